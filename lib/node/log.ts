@@ -18,15 +18,20 @@ export function createLog(level: string, destination?: DestinationStream): Logge
       hooks: {
         logMethod(args, method) {
           const [first, ...rest] = args as unknown[];
-          const cleaned = [first instanceof Error ? { err: first } : first, ...rest].map((part) =>
-            typeof part === 'string' ? redactText(part) : part,
-          );
+          const fields = first instanceof Error ? { err: first } : first;
+          // Without a message pino would take the error's own, as it is.
+          const message = rest.length === 0 && hasError(fields) ? [fields.err.message] : rest;
+          const cleaned = [fields, ...message].map((part) => (typeof part === 'string' ? redactText(part) : part));
           method.apply(this, cleaned as Parameters<typeof method>);
         },
       },
     },
     destination as DestinationStream,
   );
+}
+
+function hasError(fields: unknown): fields is { err: Error } {
+  return typeof fields === 'object' && fields !== null && 'err' in fields && fields.err instanceof Error;
 }
 
 export const log = createLog(process.env.LOG_LEVEL ?? 'info');

@@ -28,16 +28,18 @@ async function start(development) {
       return;
     }
     const web = await work;
-    say(`\nSmirr is ready after ${seconds(since)}: ${web.address}\nStop it with Ctrl-C. The log: .data/web.log`);
+    say(`\nSmirr is ready after ${seconds(since)}: ${web.address}\nStop it with Ctrl-C. The log: ${logFile}`);
     const end = await Promise.race([came.then((name) => ({ name })), web.ended.then((how) => ({ how }))]);
     if (end.how)
-      throw new Obstacle(`The web server ended by itself (${end.how}). Its log: .data/web.log. Start again: npm start`);
+      throw new Obstacle(`The web server ended by itself (${end.how}). Its log: ${logFile}. Start again: npm start`);
     say(`\nStopping (${end.name}) …`);
   } finally {
     for (const action of undo.reverse()) await action();
     say('Stopped.');
   }
 }
+
+const logFile = `${dataFolder}/web.log`;
 
 async function bringUp(development, undo, signal) {
   mkdirSync(dataFolder, { recursive: true });
@@ -53,7 +55,7 @@ async function bringUp(development, undo, signal) {
   await step('Bringing the database up to date', '', () => migrateDatabase(databaseUrl));
   signal.throwIfAborted();
   const web = await step('Starting the web server', 'a few seconds', () =>
-    startWeb({ port, databaseUrl, development, logFile: `${dataFolder}/web.log` }),
+    startWeb({ port, databaseUrl, development, logFile }),
   );
   undo.push(web.stop);
   session.note({ web: web.process, address: web.address });
