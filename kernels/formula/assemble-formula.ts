@@ -57,7 +57,8 @@ function assemble(tree: FormulaTree, context: Context): Dual {
     case 'binary': {
       const [a, b] = [build(tree.left), build(tree.right)];
       if (tree.operator === '+') return { value: out.add(a.value, b.value), slope: sum(out, a.slope, b.slope) };
-      if (tree.operator === '-') return { value: out.subtract(a.value, b.value), slope: difference(out, a.slope, b.slope) };
+      if (tree.operator === '-')
+        return { value: out.subtract(a.value, b.value), slope: difference(out, a.slope, b.slope) };
       if (tree.operator === '*') return product(out, a, b);
       return tree.operator === '/' ? quotient(out, a, b) : toThePower(out, a, b);
     }
@@ -113,7 +114,10 @@ function product(out: Assembler, a: Dual, b: Dual): Dual {
   if (a.slope && b.slope && 'scalar' in a.slope && 'scalar' in b.slope && 'vector' in a.value && 'vector' in b.value) {
     return { value, slope: out.step('blendVVSS', [b.value, a.value], [a.slope, b.slope]) };
   }
-  return { value, slope: sum(out, a.slope && out.multiply(a.slope, b.value), b.slope && out.multiply(b.slope, a.value)) };
+  return {
+    value,
+    slope: sum(out, a.slope && out.multiply(a.slope, b.value), b.slope && out.multiply(b.slope, a.value)),
+  };
 }
 
 /** (a/b)' = (a' - (a/b) b') / b */
@@ -173,17 +177,14 @@ function call(tree: FormulaTree & { type: 'call' }, out: Assembler, build: (part
         return { value, slope: choice(out, out.step('atMostVV', sides), slopeOf(best, out), slopeOf(next, out)).value };
       });
     case 'mod': {
-      const value = 'scalar' in b.value ? out.step('modVS', [a.value], [b.value]) : out.step('modVV', [a.value, b.value]);
+      const value =
+        'scalar' in b.value ? out.step('modVS', [a.value], [b.value]) : out.step('modVV', [a.value, b.value]);
       const whole = b.slope && out.step('wholeVV', [a.value, b.value]);
       return { value, slope: difference(out, a.slope, b.slope && whole && out.multiply(whole, b.slope)) };
     }
     case 'atan2': {
       const value = out.step('atan2VV', [a.value, b.value]);
-      const top = difference(
-        out,
-        a.slope && out.multiply(b.value, a.slope),
-        b.slope && out.multiply(a.value, b.slope),
-      );
+      const top = difference(out, a.slope && out.multiply(b.value, a.slope), b.slope && out.multiply(a.value, b.slope));
       const square = () => out.add(out.multiply(a.value, a.value), out.multiply(b.value, b.value));
       return { value, slope: top && out.divide(top, square()) };
     }

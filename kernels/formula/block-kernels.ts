@@ -188,7 +188,7 @@ export const BLOCK_KERNELS = {
   equalVV: map2((a, b) => (a === b ? 1 : a < b || a > b ? 0 : Number.NaN)),
   bothVV: map2(both),
   eitherVV: map2(either),
-  notV: map((a) => (a === 0 ? 1 : a !== a ? a : 0)),
+  notV: map((a) => (a === 0 ? 1 : Number.isNaN(a) ? a : 0)),
   /** condition ? a : b, point by point; not-a-number where the condition is */
   chooseVVV: (n, out, o, v, at) => {
     const c = v[0];
@@ -199,7 +199,7 @@ export const BLOCK_KERNELS = {
     const q = at[2];
     for (let i = 0; i < n; i++) {
       const held = c[r + i];
-      out[o + i] = held === 0 ? b[q + i] : held === held ? a[p + i] : held;
+      out[o + i] = held === 0 ? b[q + i] : Number.isNaN(held) ? held : a[p + i];
     }
   },
   sqrt: (n, out, o, v, at) => {

@@ -100,7 +100,8 @@ export function checkGrammar(tokens: readonly FormulaToken[], text: string, scop
     }
     if (token.kind === 'operator') {
       if (token.text === '^') {
-        if (++frame.powers > FORMULA_LIMITS.powers) fail(`A tower of powers has at most ${FORMULA_LIMITS.powers} steps`, token);
+        if (++frame.powers > FORMULA_LIMITS.powers)
+          fail(`A tower of powers has at most ${FORMULA_LIMITS.powers} steps`, token);
       } else frame.powers = 0;
       if (token.text === 'and' || token.text === 'or') closeNots(frame);
       written.push(token.text);
@@ -117,7 +118,8 @@ export function checkGrammar(tokens: readonly FormulaToken[], text: string, scop
       continue;
     }
     if (token.kind === ',') {
-      if (frame.call === null) fail('A comma separates the arguments of a function; decimals are written with a point', token);
+      if (frame.call === null)
+        fail('A comma separates the arguments of a function; decimals are written with a point', token);
       if (frame.questions.length > 0) throw lonelyQuestion(frame, text);
       frame.arguments++;
     } else if (token.kind === '?') {
@@ -134,7 +136,12 @@ export function checkGrammar(tokens: readonly FormulaToken[], text: string, scop
   if (wantsOperand) throw missingOperand(null, tokens[tokens.length - 1], frame, text);
   closeNots(frame);
   if (frame.opener !== null) {
-    throw new FormulaError('This bracket is never closed: a ) is missing', frame.opener.at, frame.opener.text.length, text);
+    throw new FormulaError(
+      'This bracket is never closed: a ) is missing',
+      frame.opener.at,
+      frame.opener.text.length,
+      text,
+    );
   }
   if (frame.questions.length > 0) throw lonelyQuestion(frame, text);
   return written.join(' ');
@@ -161,7 +168,13 @@ function lonelyQuestion(frame: Frame, text: string): FormulaError {
   return new FormulaError('This ? has no : after it; a choice is written condition ? value : other value', at, 1, text);
 }
 
-function checkName(token: FormulaToken, called: boolean, next: FormulaToken | null, text: string, scope: FormulaScope): void {
+function checkName(
+  token: FormulaToken,
+  called: boolean,
+  next: FormulaToken | null,
+  text: string,
+  scope: FormulaScope,
+): void {
   const name = token.text;
   const fail = (message: string) => {
     throw new FormulaError(message, token.at, name.length, text);
@@ -184,7 +197,12 @@ function checkName(token: FormulaToken, called: boolean, next: FormulaToken | nu
   fail(`"${name}" is ${what}; ${near === null ? `known: ${known}` : `did you mean ${near}?`}`);
 }
 
-function missingOperand(token: FormulaToken | null, previous: FormulaToken | null, frame: Frame, text: string): FormulaError {
+function missingOperand(
+  token: FormulaToken | null,
+  previous: FormulaToken | null,
+  frame: Frame,
+  text: string,
+): FormulaError {
   const at = token?.at ?? text.length;
   const length = token?.text.length ?? 0;
   if (token?.kind === ')' && frame.call !== null && previous?.kind === '(') {
@@ -206,7 +224,12 @@ function missingOperator(token: FormulaToken, previous: FormulaToken | null, tex
   }
   if (token.text === 'not') return new FormulaError('Write "and not" or "or not"', token.at, length, text);
   if (['mod', 'xor', 'to', 'in'].includes(token.text)) {
-    return new FormulaError(`${token.text} does not stand between two values; the remainder is mod(a, b)`, token.at, length, text);
+    return new FormulaError(
+      `${token.text} does not stand between two values; the remainder is mod(a, b)`,
+      token.at,
+      length,
+      text,
+    );
   }
   const right = token.kind === '(' ? '(…)' : token.text;
   const product = `${previous?.kind === ')' ? '(…)' : left}*${right}`;

@@ -1,6 +1,5 @@
-import { type ComparisonOperator, CONSTANTS, type FormulaTree } from './formula-tree';
+import { CONSTANTS, type ComparisonOperator, type FormulaTree } from './formula-tree';
 import { both, either, modulo, power, UNARY } from './scalar-functions';
-
 
 /**
  * The value of a formula at one point, by recursion: for subtrees of parameters and for single points, where setting up
@@ -39,10 +38,11 @@ export function evaluatePoint(tree: FormulaTree, lookUp: (name: string) => numbe
       return tree.operators.reduce((held, operator, i) => both(held, compare(operator, sides[i], sides[i + 1])), 1);
     }
     case 'logic': {
-      if (tree.operator === 'and') return both(value(tree.left), value(tree.right));
-      if (tree.operator === 'or') return either(value(tree.left), value(tree.right));
-      const operand = value(tree.operand);
-      return Number.isNaN(operand) ? operand : operand === 0 ? 1 : 0;
+      if (tree.operator === 'not') {
+        const operand = value(tree.operand);
+        return Number.isNaN(operand) ? operand : operand === 0 ? 1 : 0;
+      }
+      return (tree.operator === 'and' ? both : either)(value(tree.left), value(tree.right));
     }
     case 'choose': {
       const condition = value(tree.condition);

@@ -20,7 +20,8 @@ export interface FormulaScope {
 export function nameFault(name: string): string | null {
   const shown = `"${name.slice(0, 40)}"`;
   if (!/^[A-Za-z][A-Za-z0-9_]*$/.test(name)) return `${shown} is no name: a letter, then letters, digits or _`;
-  if (name.length > FORMULA_LIMITS.name) return `${shown} is too long: a name has at most ${FORMULA_LIMITS.name} characters`;
+  if (name.length > FORMULA_LIMITS.name)
+    return `${shown} is too long: a name has at most ${FORMULA_LIMITS.name} characters`;
   if (Object.hasOwn(FUNCTIONS, name)) return `${shown} is the name of a function; choose another`;
   if (Object.hasOwn(CONSTANTS, name)) return `${shown} is the name of a constant; choose another`;
   if (name === 't') return '"t" is the time; choose another name';
@@ -39,7 +40,8 @@ export function checkScope(scope: FormulaScope): void {
   for (const name of [...scope.variables, ...scope.parameters]) {
     const fault = nameFault(name);
     if (fault !== null) throw new RangeError(fault);
-    if (seen.has(name)) throw new RangeError(`"${name}" is given twice; every variable and parameter needs a name of its own`);
+    if (seen.has(name))
+      throw new RangeError(`"${name}" is given twice; every variable and parameter needs a name of its own`);
     seen.add(name);
   }
 }

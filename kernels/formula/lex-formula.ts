@@ -99,7 +99,8 @@ function tokenAt(text: string, at: number, match: (pattern: RegExp, at: number) 
   if (number !== undefined) {
     const value = Number(number);
     const shown = number.length > 24 ? `${number.slice(0, 20)}…` : number;
-    if (!Number.isFinite(value)) throw new FormulaError(`${shown} is too large: numbers go up to 1.79e308`, at, number.length, text);
+    if (!Number.isFinite(value))
+      throw new FormulaError(`${shown} is too large: numbers go up to 1.79e308`, at, number.length, text);
     if (value === 0 && /[1-9]/.test(number.split(/[eE]/)[0])) {
       throw new FormulaError(`${shown} is too small: it would count as 0`, at, number.length, text);
     }

@@ -28,7 +28,8 @@ function distance(a: string, b: string): number {
     for (let j = 1; j <= b.length; j++) {
       const change = a[i - 1] === b[j - 1] ? 0 : 1;
       let steps = Math.min(last[j] + 1, row[j - 1] + 1, last[j - 1] + change);
-      if (i > 1 && j > 1 && a[i - 1] === b[j - 2] && a[i - 2] === b[j - 1]) steps = Math.min(steps, beforeLast[j - 2] + 1);
+      if (i > 1 && j > 1 && a[i - 1] === b[j - 2] && a[i - 2] === b[j - 1])
+        steps = Math.min(steps, beforeLast[j - 2] + 1);
       row.push(steps);
     }
     beforeLast = last;

@@ -2,7 +2,7 @@ import { create, type MathNode, parseDependencies } from 'mathjs/number';
 import { checkGrammar } from './check-grammar';
 import { FormulaError } from './formula-error';
 import { checkScope, type FormulaScope } from './formula-scope';
-import type { BinaryOperator, ComparisonOperator, CONSTANTS, FormulaTree, FunctionName } from './formula-tree';
+import type { BinaryOperator, CONSTANTS, ComparisonOperator, FormulaTree, FunctionName } from './formula-tree';
 import { type FormulaToken, lexFormula } from './lex-formula';
 
 export { FormulaError } from './formula-error';

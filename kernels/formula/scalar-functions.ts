@@ -55,7 +55,7 @@ export function power(a: number, p: number): number {
  */
 export function both(a: number, b: number): number {
   if (a === 0 || b === 0) return 0;
-  return a !== a || b !== b ? Number.NaN : 1;
+  return Number.isNaN(a) || Number.isNaN(b) ? Number.NaN : 1;
 }
 
 /**
@@ -65,8 +65,8 @@ export function both(a: number, b: number): number {
  * @returns 1, 0 or not-a-number
  */
 export function either(a: number, b: number): number {
-  if ((a !== 0 && a === a) || (b !== 0 && b === b)) return 1;
-  return a !== a || b !== b ? Number.NaN : 0;
+  if ((a !== 0 && !Number.isNaN(a)) || (b !== 0 && !Number.isNaN(b))) return 1;
+  return Number.isNaN(a) || Number.isNaN(b) ? Number.NaN : 0;
 }
 
 /** The functions of one argument, real: not-a-number outside their domain. */
