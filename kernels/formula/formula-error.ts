@@ -11,7 +11,7 @@ export class FormulaError extends RangeError {
    * @param text the whole formula
    */
   constructor(message: string, at: number, length: number, text: string) {
-    super(`${message} (at character ${at + 1})`);
+    super(message);
     this.name = 'FormulaError';
     this.at = at;
     this.length = length;
