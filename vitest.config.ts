@@ -24,6 +24,7 @@ export default defineConfig({
         extends: true,
         test: {
           name: 'integration',
+          globalSetup: 'tests/support/integration-setup.ts',
           include: ['tests/integration/**/*.test.ts'],
           environment: 'node',
           // Real servers and clusters start and stop in here.
