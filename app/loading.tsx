@@ -1,0 +1,7 @@
+export default function Loading() {
+  return (
+    <p role="status" className="pt-16 text-muted">
+      One moment …
+    </p>
+  );
+}

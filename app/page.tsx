@@ -1,0 +1,3 @@
+export default function HomePage() {
+  return <h1>Smirr</h1>;
+}

@@ -1,0 +1,85 @@
+import { area, curveLinear, curveStep, line } from 'd3-shape';
+
+export interface Curve {
+  x: number[];
+  values: number[];
+}
+
+const round = (value: number) => Math.round(value * 10) / 10;
+
+/** A smooth density through its grid points. */
+export function curvePath(curve: Curve, x: (value: number) => number, y: (value: number) => number): string {
+  return (
+    line<number>()
+      .x((_, i) => round(x(curve.x[i])))
+      .y((_, i) => round(y(curve.values[i])))
+      .curve(curveLinear)(curve.values) ?? ''
+  );
+}
+
+export function areaPath(curve: Curve, x: (value: number) => number, y: (value: number) => number): string {
+  return (
+    area<number>()
+      .x((_, i) => round(x(curve.x[i])))
+      .y0(round(y(0)))
+      .y1((_, i) => round(y(curve.values[i])))(curve.values) ?? ''
+  );
+}
+
+/** A density of cells as steps; cells narrower than a pixel are averaged, which is again a density of cells. */
+export function stepPath(
+  curve: Curve,
+  x: (value: number) => number,
+  y: (value: number) => number,
+  most: number,
+): string {
+  const { x: centres, values } = mergedCells(curve, most);
+  const half = centres.length > 1 ? (centres[1] - centres[0]) / 2 : 0;
+  const points = [
+    [centres[0] - half, 0],
+    ...centres.map((centre, i) => [centre, values[i]]),
+    [(centres.at(-1) ?? 0) + half, 0],
+  ];
+  return (
+    line<number[]>()
+      .x(([at]) => round(x(at)))
+      .y(([, value]) => round(y(value)))
+      .curve(curveStep)(points) ?? ''
+  );
+}
+
+export function mergedCells(curve: Curve, most: number): Curve {
+  const factor = Math.ceil(curve.values.length / most);
+  if (factor <= 1) return curve;
+  const merged: Curve = { x: [], values: [] };
+  for (let first = 0; first < curve.values.length; first += factor) {
+    const last = Math.min(first + factor, curve.values.length);
+    let x = 0;
+    let sum = 0;
+    for (let i = first; i < last; i++) {
+      x += curve.x[i];
+      sum += curve.values[i];
+    }
+    merged.x.push(x / (last - first));
+    merged.values.push(sum / (last - first));
+  }
+  return merged;
+}
+
+/** The value at a place: linear between grid points, the cell's own for cells. */
+export function valueAt(curve: Curve, at: number, cells: boolean): number | null {
+  const { x, values } = curve;
+  const last = x.length - 1;
+  const half = last > 0 ? (x[1] - x[0]) / 2 : 0;
+  if (last < 0 || at < x[0] - half || at > x[last] + half) return null;
+  let low = 0;
+  let high = last;
+  while (high - low > 1) {
+    const middle = (low + high) >> 1;
+    if (x[middle] <= at) low = middle;
+    else high = middle;
+  }
+  if (cells) return at - x[low] <= x[high] - at ? values[low] : values[high];
+  const share = Math.min(Math.max((at - x[low]) / (x[high] - x[low] || 1), 0), 1);
+  return values[low] * (1 - share) + values[high] * share;
+}
