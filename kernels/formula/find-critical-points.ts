@@ -67,9 +67,15 @@ function searchPiece(
       const at = bisect(slopeAt, x[i], x[i + 1]);
       // A change of sign through a jump of the slope that nobody listed is no zero.
       if (size(at) < 1e-6 * Math.max(Math.abs(left), Math.abs(right))) found.push(at);
-    } else if (i > 0 && left * right > 0 && Math.abs(left) <= Math.abs(right) && Math.abs(left) < Math.abs(slope[i - 1])) {
+    } else if (
+      i > 0 &&
+      left * right > 0 &&
+      Math.abs(left) <= Math.abs(right) &&
+      Math.abs(left) < Math.abs(slope[i - 1])
+    ) {
       const at = leastSize(size, x[i - 1], x[i + 1]);
-      if (isPower(size, at, -1, (x[i] - low) / 8) && isPower(size, at, 1, (high - x[i]) / 8) && size(at) < 1e-9 * scale) found.push(at);
+      if (isPower(size, at, -1, (x[i] - low) / 8) && isPower(size, at, 1, (high - x[i]) / 8) && size(at) < 1e-9 * scale)
+        found.push(at);
     }
   }
   if (isPower(size, low, 1, length / 8)) found.push(low);
