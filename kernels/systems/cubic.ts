@@ -29,6 +29,12 @@ export const cubic: SystemDefinition = {
       source: '1 + 2a at x = 1, exact',
     },
     {
+      quantity: 'the two bands meet at a',
+      parameters: {},
+      value: 1 + (3 * Math.sqrt(3)) / 2,
+      source: 'the image of the local maximum is 0, exact',
+    },
+    {
       quantity: 'Lyapunov exponent',
       parameters: { a: 4 },
       value: Math.log(3),
@@ -41,5 +47,5 @@ export const cubic: SystemDefinition = {
       source: '1/(pi sqrt(1 - x^2)): Chebyshev polynomial, exact',
     },
   ],
-  summary: 'An odd map with two symmetric bands; up to a = 2.598 each keeps its orbits, and noise makes them cross.',
+  summary: 'An odd map with two symmetric bands; up to a = 3.598 each keeps its orbits, and noise makes them cross.',
 };
