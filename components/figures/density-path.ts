@@ -1,4 +1,4 @@
-import { area, curveLinear, curveStep, line } from 'd3-shape';
+import { area, curveMonotoneX, curveStep, line } from 'd3-shape';
 
 export interface Curve {
   x: number[];
@@ -13,7 +13,7 @@ export function curvePath(curve: Curve, x: (value: number) => number, y: (value:
     line<number>()
       .x((_, i) => round(x(curve.x[i])))
       .y((_, i) => round(y(curve.values[i])))
-      .curve(curveLinear)(curve.values) ?? ''
+      .curve(curveMonotoneX)(curve.values) ?? ''
   );
 }
 
@@ -22,7 +22,8 @@ export function areaPath(curve: Curve, x: (value: number) => number, y: (value: 
     area<number>()
       .x((_, i) => round(x(curve.x[i])))
       .y0(round(y(0)))
-      .y1((_, i) => round(y(curve.values[i])))(curve.values) ?? ''
+      .y1((_, i) => round(y(curve.values[i])))
+      .curve(curveMonotoneX)(curve.values) ?? ''
   );
 }
 

@@ -3,7 +3,7 @@
 import Link from 'next/link';
 import { usePathname } from 'next/navigation';
 
-const pages = [{ href: '/explore', label: 'Explore' }];
+const pages = [{ href: '/explore', label: 'Explore' }] as const;
 
 export function SiteNav() {
   const path = usePathname();

@@ -20,6 +20,11 @@ interface AdjustableNumberProps {
 
 const PIXELS_PER_STEP = 3;
 
+/** In widths of a digit; a point takes half of one. */
+function widthOf(text: string): number {
+  return Math.max(text.length - (text.match(/[.,]/g)?.length ?? 0) * 0.5, 1);
+}
+
 /** A number inside an equation: drag it sideways, use the arrow keys (shift for coarse), or type. */
 export function AdjustableNumber({
   label,
@@ -108,8 +113,8 @@ export function AdjustableNumber({
         onPointerMove={move}
         onPointerUp={up}
         onPointerCancel={up}
-        style={{ width: `${Math.max(text.length, 1)}ch` }}
-        className={`box-content cursor-ew-resize touch-pan-y border-b-2 border-dotted bg-transparent px-0.5 text-center leading-tight text-rain ${wrong ? 'border-solid border-ink' : 'border-rain'} ${className}`}
+        style={{ width: `${widthOf(text)}ch` }}
+        className={`box-content cursor-ew-resize touch-pan-y border-b-2 border-dotted bg-transparent text-center leading-tight text-rain ${wrong ? 'border-solid border-ink' : 'border-rain'} ${className}`}
       />
       {wrong !== undefined && (
         <span

@@ -3,6 +3,8 @@ import type { TypesetFormula } from './typeset-types';
 
 export interface ParameterEntry {
   name: string;
+  /** What it is, in words. */
+  title: string;
   unit: string;
   min: number;
   max: number;
@@ -13,10 +15,14 @@ export interface ParameterEntry {
 export interface SystemEntry {
   id: string;
   title: string;
+  group: string;
+  summary: string;
   variable: string;
   formula: string;
   typeset: TypesetFormula;
   parameters: ParameterEntry[];
   domain: { from: number; to: number; ends: Ends };
+  /** The usual noise level, in the unit of the variable. */
+  sigma: number;
   citation: string;
 }

@@ -1,0 +1,60 @@
+'use client';
+
+import type { StudyFile } from '@/lib/shared/study-types';
+import type { SystemEntry } from '@/lib/shared/system-entry';
+import type { TypesetFormula } from '@/lib/shared/typeset-types';
+import { Address } from './address';
+import { DensityPanel } from './density-panel';
+import { EquationForm } from './equation-form';
+import { ExploreProvider } from './explore-context';
+import { KeyNumbers } from './key-numbers';
+import { NoisePanel } from './noise-panel';
+import { ProgressLine } from './progress-line';
+import { Settings } from './settings';
+import { SpectrumPanel } from './spectrum-panel';
+import { StudyBar } from './study-bar';
+import { StudyFaults } from './study-faults';
+
+interface BenchProps {
+  study: StudyFile;
+  catalogue: SystemEntry[];
+  /** The study's typed formula laid out, where it has one. */
+  typesets: Record<string, TypesetFormula>;
+  /** What was wrong with the address, where the study is not the one it meant. */
+  addressFault?: string;
+}
+
+export function Bench({ study, catalogue, typesets, addressFault }: BenchProps) {
+  return (
+    <ExploreProvider study={study} catalogue={catalogue} typesets={typesets}>
+      <div className="pt-4">
+        {addressFault && (
+          <p role="alert" className="mb-3 border-l-2 border-ink pl-3">
+            The address does not hold a study that can be read ({addressFault}). This is the bench’s first study
+            instead.
+          </p>
+        )}
+        <StudyBar />
+        <EquationForm />
+        <div className="flex flex-wrap items-start justify-between gap-x-6">
+          <Settings />
+          <ProgressLine />
+        </div>
+        <StudyFaults />
+        <Address />
+        <div className="mt-4 grid gap-x-8 gap-y-8 lg:grid-cols-[minmax(0,1.85fr)_minmax(0,1fr)]">
+          <div className="min-w-0 lg:border-r lg:border-rule lg:pr-8">
+            <DensityPanel />
+            <div className="mt-6">
+              <KeyNumbers />
+            </div>
+          </div>
+          <SpectrumPanel />
+        </div>
+        <div className="mt-6 max-sm:contents">
+          <NoisePanel />
+        </div>
+      </div>
+    </ExploreProvider>
+  );
+}

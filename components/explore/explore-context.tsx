@@ -1,0 +1,60 @@
+'use client';
+
+import { createContext, type ReactNode, useContext, useEffect, useState } from 'react';
+import { useStore } from 'zustand';
+import { browserKernelHost } from '@/lib/client/browser-kernel-host';
+import type { ExploreState } from '@/lib/client/explore-core';
+import { createExploreStore, type ExploreActions, type ExploreStore } from '@/lib/client/explore-store';
+import type { StudyFile } from '@/lib/shared/study-types';
+import type { SystemEntry } from '@/lib/shared/system-entry';
+import type { TypesetFormula } from '@/lib/shared/typeset-types';
+
+const StoreContext = createContext<ExploreStore | null>(null);
+const CatalogueContext = createContext<SystemEntry[]>([]);
+
+const timers = {
+  after(ms: number, run: () => void) {
+    const timer = setTimeout(run, ms);
+    return () => clearTimeout(timer);
+  },
+};
+
+interface ExploreProviderProps {
+  study: StudyFile;
+  catalogue: SystemEntry[];
+  typesets: Record<string, TypesetFormula>;
+  children: ReactNode;
+}
+
+export function ExploreProvider({ study, catalogue, typesets, children }: ExploreProviderProps) {
+  const [store] = useState(() => createExploreStore(study, browserKernelHost, timers, typesets));
+  useEffect(() => {
+    store.getState().start();
+    return () => store.getState().dispose();
+  }, [store]);
+  return (
+    <CatalogueContext value={catalogue}>
+      <StoreContext value={store}>{children}</StoreContext>
+    </CatalogueContext>
+  );
+}
+
+export function useExploreStore(): ExploreStore {
+  const store = useContext(StoreContext);
+  if (store === null) throw new Error('the bench is used outside its provider');
+  return store;
+}
+
+export function useExplore<T>(select: (state: ExploreState & ExploreActions) => T): T {
+  return useStore(useExploreStore(), select);
+}
+
+/** The catalogue's entry for a study's system; undefined for a typed formula. */
+export function useSystem(): SystemEntry | undefined {
+  const id = useExplore((state) => state.study.system.id);
+  return useContext(CatalogueContext).find((entry) => entry.id === id);
+}
+
+export function useCatalogue(): SystemEntry[] {
+  return useContext(CatalogueContext);
+}

@@ -1,0 +1,60 @@
+'use client';
+
+import { losesMass } from '@/lib/shared/bench-study';
+import { useExplore } from './explore-context';
+import { KeyNumber } from './key-number';
+
+/** How long it stays, how fast it forgets, how fast neighbours part. */
+export function KeyNumbers() {
+  const picture = useExplore((state) => state.picture);
+  const absorbing = useExplore((state) => state.study.domain.some(({ ends }) => losesMass(ends)));
+  const settled = picture?.settled ?? false;
+  const wait = picture === null ? '…' : 'not known here';
+  const { exit, spectrum, lyapunov } = picture?.case ?? {};
+  return (
+    <section aria-label="Key numbers">
+      <dl className="grid grid-cols-2 gap-x-4 gap-y-2 sm:flex sm:flex-wrap sm:gap-x-12">
+        <KeyNumber
+          id="mean-exit-time"
+          label="Mean exit time"
+          unit="steps"
+          quantity={exit?.meanTime}
+          absent={absorbing ? wait : 'nothing leaves: no end absorbs'}
+          settled={settled}
+        />
+        <KeyNumber
+          id="relaxation-time"
+          label="Relaxation time"
+          unit="steps"
+          quantity={spectrum?.relaxationTime}
+          absent={wait}
+          settled={settled}
+        />
+        <KeyNumber
+          id="lyapunov-exponent"
+          label="Lyapunov exponent"
+          unit="per step"
+          quantity={lyapunov?.value}
+          absent={wait}
+          settled={settled}
+        />
+        {lyapunov?.survivors && (
+          <KeyNumber
+            id="survivors-exponent"
+            label="Exponent of the survivors"
+            unit="per step"
+            quantity={lyapunov.survivors}
+            absent={wait}
+            settled={settled}
+          />
+        )}
+      </dl>
+      {absorbing && (
+        <p className="mt-2 max-w-3xl text-[0.8125rem] text-muted">
+          Exit times hold for the model and the noise as stated; figures of rare events extrapolate. They are no safety
+          assessment: the codes that apply and a licensed engineer decide.
+        </p>
+      )}
+    </section>
+  );
+}

@@ -1,0 +1,67 @@
+import type { EigenvalueRow } from '@/lib/shared/eigenvalue-rows';
+import { formatDigits, formatUncertainty, NBSP } from '@/lib/shared/format-number';
+
+interface SpectrumTableProps {
+  rows: EigenvalueRow[];
+  settled: boolean;
+  chosen: number | null;
+  onChoose(index: number | null): void;
+}
+
+const heads = ['', 'modulus', 'phase', 'lasts, steps', ''];
+
+/** Eigenvalues with noise: how strong, how they turn, how long a pattern of theirs lasts. */
+export function SpectrumTable({ rows, settled, chosen, onChoose }: SpectrumTableProps) {
+  return (
+    <table className="w-full whitespace-nowrap text-xs sm:text-[0.8125rem]" data-table="spectrum">
+      <caption className="sr-only">Eigenvalues with noise; a conjugate pair stands in one row</caption>
+      <thead>
+        <tr className="border-b border-rule text-muted">
+          <th scope="col" className="py-1 text-left font-normal">
+            <span className="sr-only">place</span>
+          </th>
+          {heads.slice(1, 4).map((head) => (
+            <th key={head} scope="col" className="py-1 pl-2 text-right font-medium">
+              {head}
+            </th>
+          ))}
+          <th scope="col" className="py-1 pl-2 text-right font-medium">
+            <span className="sr-only">uncertainty of the eigenvalue</span>±
+          </th>
+        </tr>
+      </thead>
+      <tbody className="figures">
+        {rows.map((row) => (
+          <tr
+            key={row.place}
+            onPointerEnter={() => onChoose(row.index)}
+            onPointerLeave={() => onChoose(null)}
+            className={`border-b border-rule-soft ${chosen === row.index ? 'bg-rain-soft' : ''}`}
+          >
+            <th scope="row" className="py-1 text-left font-normal">
+              {row.place}
+            </th>
+            <td className="pl-2 text-right" data-cell="modulus">
+              {formatDigits(row.modulus, { uncertainty: row.uncertainty, digits: row.uncertainty === null ? 4 : 10 })}
+            </td>
+            <td className="pl-2 text-right">
+              {row.pair ? '±' : ''}
+              {formatDigits(row.phase, { uncertainty: row.phaseUncertainty, digits: row.uncertainty === null ? 3 : 5 })}
+              {row.phase === 0 ? '' : `${NBSP}π`}
+            </td>
+            <td className="pl-2 text-right">
+              {formatDigits(row.lasts, {
+                uncertainty: row.lastsUncertainty,
+                digits: row.uncertainty === null ? 3 : 5,
+                absent: 'for ever',
+              })}
+            </td>
+            <td className={`pl-2 text-right text-muted ${settled ? '' : 'opacity-40'}`} data-cell="uncertainty">
+              {formatUncertainty(row.uncertainty).replace(`±${NBSP}`, '')}
+            </td>
+          </tr>
+        ))}
+      </tbody>
+    </table>
+  );
+}

@@ -1,0 +1,67 @@
+import type { Bounds } from '@/lib/shared/step-number';
+import type { StudyFile } from '@/lib/shared/study-types';
+import type { SystemEntry } from '@/lib/shared/system-entry';
+
+type Interval = StudyFile['domain'][number];
+
+export function withSigma(study: StudyFile, sigma: number): StudyFile {
+  return { ...study, noise: { ...study.noise, sigma } };
+}
+
+export function withParameter(study: StudyFile, name: string, value: number): StudyFile {
+  return { ...study, system: { ...study.system, parameters: { ...study.system.parameters, [name]: value } } };
+}
+
+export function withInterval(study: StudyFile, change: Partial<Interval>): StudyFile {
+  return { ...study, domain: [{ ...study.domain[0], ...change }] };
+}
+
+export function withKind(study: StudyFile, kind: StudyFile['noise']['kind']): StudyFile {
+  const { sigma, ...rest } = study.noise;
+  if (kind === 'none') return { ...study, noise: { ...rest, kind } };
+  return { ...study, noise: { ...rest, kind, sigma: sigma ?? 0.01 * (study.domain[0].to - study.domain[0].from) } };
+}
+
+export function withPoints(study: StudyFile, points: number | 'auto'): StudyFile {
+  const { points: _points, ...rest } = study.grid ?? {};
+  const grid = points === 'auto' ? rest : { ...rest, points };
+  const { grid: _grid, ...others } = study;
+  return Object.keys(grid).length > 0 ? { ...others, grid } : others;
+}
+
+/** A system of the catalogue with its usual parameters, domain and noise level. */
+export function withSystem(study: StudyFile, entry: SystemEntry): StudyFile {
+  return {
+    ...study,
+    title: `${entry.title} under noise`,
+    system: {
+      type: 'map',
+      id: entry.id,
+      parameters: Object.fromEntries(entry.parameters.map((parameter) => [parameter.name, parameter.default])),
+    },
+    noise: study.noise.kind === 'none' ? study.noise : { ...study.noise, sigma: entry.sigma },
+    domain: [entry.domain],
+  };
+}
+
+/** A typed formula keeps the parameters that it still names; new ones begin at 1. */
+export function withFormula(study: StudyFile, formula: string, variable: string, names: string[]): StudyFile {
+  const before = study.system.parameters ?? {};
+  const { id: _id, parameters: _parameters, ...rest } = study.system;
+  return {
+    ...study,
+    system: {
+      ...rest,
+      variables: [variable],
+      formulas: [formula],
+      parameters: Object.fromEntries(names.map((name) => [name, before[name] ?? 1])),
+    },
+  };
+}
+
+/** The slider's reach: from a thousandth to half of the domain's length. */
+export function sigmaBounds(study: StudyFile): Bounds {
+  const { from, to } = study.domain[0];
+  const length = Math.abs(to - from) || 1;
+  return { min: Number((length * 1e-3).toPrecision(3)), max: Number((length * 0.5).toPrecision(3)) };
+}
