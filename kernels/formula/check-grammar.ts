@@ -128,7 +128,8 @@ export function checkGrammar(tokens: readonly FormulaToken[], text: string, scop
     } else if (frame.questions.pop() === undefined) {
       fail('This : has no ? before it; a choice is written condition ? value : other value', token);
     }
-    written.push(token.text);
+    // The parser wants a choice within a choice in brackets.
+    written.push(token.kind === '?' ? '? (' : token.kind === ':' ? ') :' : ',');
     wantsOperand = true;
   }
 

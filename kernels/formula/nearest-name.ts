@@ -11,13 +11,20 @@ export function nearestName(name: string, known: readonly string[]): string | nu
   let best: string | null = null;
   let least = name.length <= 3 ? 1.5 : 2.5;
   for (const candidate of known) {
-    const steps = distance(name.toLowerCase(), candidate.toLowerCase());
-    if (steps < least && steps < Math.max(name.length, candidate.length)) {
+    // Of two equally near names the one with the longer common beginning: sinn is rather sin than sign.
+    const steps = distance(name.toLowerCase(), candidate.toLowerCase()) - commonStart(name, candidate) / 1000;
+    if (steps < least && Math.ceil(steps) < Math.max(name.length, candidate.length)) {
       least = steps;
       best = candidate;
     }
   }
   return best;
+}
+
+function commonStart(a: string, b: string): number {
+  let k = 0;
+  while (k < a.length && k < b.length && a[k] === b[k]) k++;
+  return k;
 }
 
 function distance(a: string, b: string): number {

@@ -64,7 +64,8 @@ function powerSwitches(base: FormulaTree, exponent: FormulaTree, valueAt: (part:
   return [{ part: base, levels: ZERO, kind: p < 0 ? 'pole' : 'root' }];
 }
 
-function callSwitches({ name, arguments: given }: FormulaTree & { type: 'call' }): Switch[] {
+function callSwitches(tree: FormulaTree & { type: 'call' }): Switch[] {
+  const { name, arguments: given } = tree;
   const [a, b] = given;
   switch (name) {
     case 'abs':
@@ -81,7 +82,15 @@ function callSwitches({ name, arguments: given }: FormulaTree & { type: 'call' }
     case 'min':
     case 'max':
       return given.flatMap((left, k) =>
-        given.slice(k + 1).map((right): Switch => ({ part: binary('-', left, right), levels: ZERO, kind: 'kink' })),
+        given.slice(k + 1).map((right): Switch => {
+          const chosen = (side: FormulaTree): FormulaTree => ({
+            type: 'comparison',
+            operators: ['=='],
+            operands: [side, tree],
+          });
+          const keep: FormulaTree = { type: 'logic', operator: 'or', left: chosen(left), right: chosen(right) };
+          return { part: binary('-', left, right), levels: ZERO, kind: 'kink', keep };
+        }),
       );
     case 'sqrt':
     case 'cbrt':
