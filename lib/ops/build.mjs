@@ -12,7 +12,7 @@ const stamp = `${root}/.next/sources`;
 
 /** Builds the pages and the bundles where their sources changed since the last build. */
 export async function ensureBuild({ signal } = {}) {
-  for (const name of ['migrate']) await ensureBundle(name);
+  for (const name of ['cli', 'migrate']) await ensureBundle(name);
   if (isBuilt()) return;
   await withLock(
     `${buildFolder}/build.lock`,
@@ -35,7 +35,7 @@ async function buildPages(signal) {
   const result = await run(process.execPath, ['node_modules/next/dist/bin/next', 'build'], {
     cwd: root,
     signal,
-    env: { ...process.env, NODE_ENV: 'production', NEXT_TELEMETRY_DISABLED: '1' },
+    env: { ...process.env, NODE_ENV: 'production', NEXT_TELEMETRY_DISABLED: '1', NO_COLOR: '1' },
   });
   const output = result.stdout + result.stderr;
   if (result.status !== 0) throw new Obstacle(`The pages could not be built:\n\n${tail(output, 60)}`);

@@ -27,12 +27,13 @@ export async function ensurePostgres(version) {
     );
   }
   // The package would make and start a cluster of its own; nobody asked for that one. The note goes after the install.
-  const note = '/etc/postgresql-common/createcluster.d/smirr.conf';
+  const folder = '/etc/postgresql-common/createcluster.d';
+  const note = `${folder}/smirr.conf`;
   await installDebian(['postgresql'], {
     why: 'Smirr keeps its data in PostgreSQL.',
     expect: 'up to a minute',
-    before: `mkdir -p ${note.slice(0, note.lastIndexOf('/'))}; echo 'create_main_cluster = false' > ${note}`,
-    after: `rm -f ${note}`,
+    before: `mkdir -p ${folder}; echo 'create_main_cluster = false' > ${note}`,
+    after: `rm -f ${note}; rmdir ${folder} 2>/dev/null || true`,
   });
   const installed = findPostgres(version);
   if (!installed)
