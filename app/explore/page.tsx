@@ -1,8 +1,10 @@
 import type { Metadata } from 'next';
 import { Bench } from '@/components/explore/bench';
+import { firstPicture } from '@/components/first-study/first-result';
 import { FIRST_STUDY } from '@/lib/shared/bench-study';
 import { catalogueEntries } from '@/lib/shared/catalogue';
 import { decodeStudy } from '@/lib/shared/decode-study';
+import { encodeStudy } from '@/lib/shared/encode-study';
 import { typesetStudy } from '@/lib/shared/typeset-study';
 
 export const metadata: Metadata = { title: 'Explore' };
@@ -13,5 +15,6 @@ export default async function ExplorePage({ searchParams }: PageProps<'/explore'
   const study = decoded && 'study' in decoded ? decoded.study : FIRST_STUDY;
   const typeset = typesetStudy(study);
   const typesets = typeset && study.system.formulas ? { [study.system.formulas[0]]: typeset } : {};
-  return <Bench study={study} catalogue={catalogueEntries()} typesets={typesets} addressFault={fault} />;
+  const picture = encodeStudy(study) === encodeStudy(FIRST_STUDY) ? firstPicture() : null;
+  return <Bench beginning={{ study, typesets, picture }} catalogue={catalogueEntries()} addressFault={fault} />;
 }

@@ -1,8 +1,7 @@
 'use client';
 
-import type { StudyFile } from '@/lib/shared/study-types';
+import type { ExploreBeginning } from '@/lib/client/explore-store';
 import type { SystemEntry } from '@/lib/shared/system-entry';
-import type { TypesetFormula } from '@/lib/shared/typeset-types';
 import { Address } from './address';
 import { DensityPanel } from './density-panel';
 import { EquationForm } from './equation-form';
@@ -16,17 +15,15 @@ import { StudyBar } from './study-bar';
 import { StudyFaults } from './study-faults';
 
 interface BenchProps {
-  study: StudyFile;
+  beginning: ExploreBeginning;
   catalogue: SystemEntry[];
-  /** The study's typed formula laid out, where it has one. */
-  typesets: Record<string, TypesetFormula>;
   /** What was wrong with the address, where the study is not the one it meant. */
   addressFault?: string;
 }
 
-export function Bench({ study, catalogue, typesets, addressFault }: BenchProps) {
+export function Bench({ beginning, catalogue, addressFault }: BenchProps) {
   return (
-    <ExploreProvider study={study} catalogue={catalogue} typesets={typesets}>
+    <ExploreProvider beginning={beginning} catalogue={catalogue}>
       <div className="pt-4">
         {addressFault && (
           <p role="alert" className="mb-3 border-l-2 border-ink pl-3">

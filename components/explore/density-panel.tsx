@@ -2,7 +2,7 @@
 
 import { useState } from 'react';
 import { DensityFigure } from '@/components/figures/density-figure';
-import { valueAt } from '@/components/figures/density-path';
+import { cellValue, nearestIndex } from '@/components/figures/density-path';
 import { DENSITY_MARGIN } from '@/components/figures/density-scales';
 import { FigureFrame } from '@/components/figures/figure-frame';
 import { LegendMark } from '@/components/figures/legend-mark';
@@ -14,13 +14,12 @@ import { useExplore } from './explore-context';
 import { resultNotes } from './result-notes';
 
 const HEIGHT = 352;
-const STEPS = 200;
 
 export function DensityPanel() {
   const picture = useExplore((state) => state.picture);
   const draft = useExplore((state) => state.study);
   const [ref, width] = useWidth<HTMLDivElement>(820);
-  const [share, setShare] = useState<number | null>(null);
+  const [index, setIndex] = useState<number | null>(null);
   const study = picture?.study ?? draft;
   const { from, to } = study.domain[0];
   const name = study.system.variables?.[0] ?? 'x';
@@ -34,15 +33,21 @@ export function DensityPanel() {
   const cells = stationary?.deterministic;
   const without = quiet ? curve : cells ? { x: cells.x[0], values: cells.values } : null;
 
-  const at = share === null ? null : from + share * (to - from);
-  const withNoise = at === null || !noisy ? null : valueAt(noisy, at, false);
-  const withoutNoise = at === null || !without ? null : valueAt(without, at, true);
+  // The readout stands on points of the grid: between them a value would not be known to its last digit.
+  const places = (noisy ?? without)?.x ?? [];
+  const place = index === null ? undefined : places[Math.min(index, places.length - 1)];
+  const at = place ?? null;
   const uncertainty = stationary?.uncertainty ?? null;
+  const withNoise = at === null || !noisy ? null : noisy.values[nearestIndex(noisy.x, at)];
+  const withoutNoise = at === null || !without ? null : cellValue(without, at);
   const words = [
-    at === null ? 'no place chosen' : `${name} = ${formatDigits(at, { digits: 4 })}${unit ? ` ${unit}` : ''}`,
-    ...(withNoise === null ? [] : [`with noise ${formatDigits(withNoise, { uncertainty, digits: 10 })}`]),
+    at === null ? 'no place chosen' : `${name} = ${formatDigits(at)}${unit ? ` ${unit}` : ''}`,
+    ...(withNoise === null
+      ? []
+      : [`with noise ${formatDigits(withNoise, { uncertainty, digits: uncertainty ? 10 : 4 })}`]),
     ...(withoutNoise === null ? [] : [`without ${formatDigits(withoutNoise, { digits: 3 })}`]),
   ];
+  const right = at !== null && at > (from + to) / 2;
   const inner = width - DENSITY_MARGIN.left - DENSITY_MARGIN.right;
   const title = 'Density in the long run';
   return (
@@ -61,10 +66,10 @@ export function DensityPanel() {
           { name: 'density with noise', unit: unit ? `per ${unit}` : '' },
           { name: 'density without noise', unit: unit ? `per ${unit}` : '' },
         ],
-        rows: (curve?.x ?? []).map((place, i) => [
-          place,
+        rows: (curve?.x ?? []).map((x, i) => [
+          x,
           quiet ? null : (curve?.values[i] ?? null),
-          without ? valueAt(without, place, true) : null,
+          without ? cellValue(without, x) : null,
         ]),
       })}
       notes={() => resultNotes(picture)}
@@ -83,18 +88,18 @@ export function DensityPanel() {
         />
         <ReadoutSlider
           label={`Readout along ${name}`}
-          now={Math.round((share ?? 0.5) * STEPS)}
-          steps={STEPS}
+          now={Math.min(index ?? 0, Math.max(places.length - 1, 0))}
+          steps={Math.max(places.length - 1, 0)}
           text={words.join(', ')}
-          onPoint={(x) => setShare(Math.min(Math.max((x - DENSITY_MARGIN.left) / inner, 0), 1))}
-          onStep={(now) => setShare(now / STEPS)}
-          onLeave={() => setShare(null)}
+          onPoint={(x) => setIndex(nearestIndex(places, from + ((x - DENSITY_MARGIN.left) / inner) * (to - from)))}
+          onStep={setIndex}
+          onLeave={() => setIndex(null)}
         />
         {at !== null && (
           <p
             aria-hidden="true"
             className="figures pointer-events-none absolute top-5 bg-paper px-1 text-[0.8125rem]"
-            style={share !== null && share > 0.5 ? { left: DENSITY_MARGIN.left } : { right: DENSITY_MARGIN.right }}
+            style={right ? { left: DENSITY_MARGIN.left } : { right: DENSITY_MARGIN.right }}
           >
             {words.map((word) => (
               <span key={word} className="block">

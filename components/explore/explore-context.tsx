@@ -4,10 +4,13 @@ import { createContext, type ReactNode, useContext, useEffect, useState } from '
 import { useStore } from 'zustand';
 import { browserKernelHost } from '@/lib/client/browser-kernel-host';
 import type { ExploreState } from '@/lib/client/explore-core';
-import { createExploreStore, type ExploreActions, type ExploreStore } from '@/lib/client/explore-store';
-import type { StudyFile } from '@/lib/shared/study-types';
+import {
+  createExploreStore,
+  type ExploreActions,
+  type ExploreBeginning,
+  type ExploreStore,
+} from '@/lib/client/explore-store';
 import type { SystemEntry } from '@/lib/shared/system-entry';
-import type { TypesetFormula } from '@/lib/shared/typeset-types';
 
 const StoreContext = createContext<ExploreStore | null>(null);
 const CatalogueContext = createContext<SystemEntry[]>([]);
@@ -20,14 +23,13 @@ const timers = {
 };
 
 interface ExploreProviderProps {
-  study: StudyFile;
+  beginning: ExploreBeginning;
   catalogue: SystemEntry[];
-  typesets: Record<string, TypesetFormula>;
   children: ReactNode;
 }
 
-export function ExploreProvider({ study, catalogue, typesets, children }: ExploreProviderProps) {
-  const [store] = useState(() => createExploreStore(study, browserKernelHost, timers, typesets));
+export function ExploreProvider({ beginning, catalogue, children }: ExploreProviderProps) {
+  const [store] = useState(() => createExploreStore(beginning, browserKernelHost, timers));
   useEffect(() => {
     store.getState().start();
     return () => store.getState().dispose();

@@ -1,6 +1,7 @@
 'use client';
 
 import { losesMass } from '@/lib/shared/bench-study';
+import { EXIT_CAUTION } from './exit-caution';
 import { useExplore } from './explore-context';
 import { KeyNumber } from './key-number';
 
@@ -49,12 +50,7 @@ export function KeyNumbers() {
           />
         )}
       </dl>
-      {absorbing && (
-        <p className="mt-2 max-w-3xl text-[0.8125rem] text-muted">
-          Exit times hold for the model and the noise as stated; figures of rare events extrapolate. They are no safety
-          assessment: the codes that apply and a licensed engineer decide.
-        </p>
-      )}
+      {absorbing && <p className="mt-2 max-w-3xl text-[0.8125rem] text-muted">{EXIT_CAUTION}</p>}
     </section>
   );
 }

@@ -67,20 +67,22 @@ export function mergedCells(curve: Curve, most: number): Curve {
   return merged;
 }
 
-/** The value at a place: linear between grid points, the cell's own for cells. */
-export function valueAt(curve: Curve, at: number, cells: boolean): number | null {
-  const { x, values } = curve;
-  const last = x.length - 1;
-  const half = last > 0 ? (x[1] - x[0]) / 2 : 0;
-  if (last < 0 || at < x[0] - half || at > x[last] + half) return null;
+/** Index of the point nearest to a place; the points increase. */
+export function nearestIndex(x: number[], at: number): number {
   let low = 0;
-  let high = last;
+  let high = x.length - 1;
   while (high - low > 1) {
     const middle = (low + high) >> 1;
     if (x[middle] <= at) low = middle;
     else high = middle;
   }
-  if (cells) return at - x[low] <= x[high] - at ? values[low] : values[high];
-  const share = Math.min(Math.max((at - x[low]) / (x[high] - x[low] || 1), 0), 1);
-  return values[low] * (1 - share) + values[high] * share;
+  return Math.abs(at - x[low]) <= Math.abs(x[high] - at) ? low : high;
+}
+
+/** The density of the cell that holds a place; null outside all cells. */
+export function cellValue({ x, values }: Curve, at: number): number | null {
+  if (x.length === 0) return null;
+  const half = x.length > 1 ? (x[1] - x[0]) / 2 : Number.POSITIVE_INFINITY;
+  const nearest = nearestIndex(x, at);
+  return Math.abs(at - x[nearest]) <= half * (1 + 1e-9) ? values[nearest] : null;
 }

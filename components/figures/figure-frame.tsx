@@ -12,10 +12,10 @@ interface FigureFrameProps {
   /** Says with words and marks what each colour stands for. */
   legend?: ReactNode;
   ledger?: ReactNode;
-  /** The figure's numbers, made when somebody asks for them. */
-  numbers?: () => NumberTable;
+  /** The figure's numbers, or what makes them when somebody asks. */
+  numbers?: NumberTable | (() => NumberTable);
   /** Lines at the head of a CSV: where its numbers come from. */
-  notes?: () => string[];
+  notes?: string[] | (() => string[]);
   children: ReactNode;
 }
 
@@ -41,7 +41,7 @@ export function FigureFrame({ title, legend, ledger, numbers, notes, children }:
               SVG
             </TextButton>
             <TextButton
-              onClick={() => saveFile(fileName(title, 'csv'), 'text/csv', numbersCsv(numbers(), notes?.()))}
+              onClick={() => saveFile(fileName(title, 'csv'), 'text/csv', numbersCsv(made(numbers), made(notes)))}
               aria-label={`Save CSV: ${title}`}
             >
               CSV
@@ -53,7 +53,11 @@ export function FigureFrame({ title, legend, ledger, numbers, notes, children }:
         {children}
       </div>
       <p className="figures mt-1 min-h-5 text-[0.8125rem] text-muted">{ledger}</p>
-      {open && numbers && <NumberTableView table={numbers()} caption={title} />}
+      {open && numbers && <NumberTableView table={made(numbers)} caption={title} />}
     </figure>
   );
+}
+
+function made<T>(given: T | (() => T)): T {
+  return typeof given === 'function' ? (given as () => T)() : given;
 }

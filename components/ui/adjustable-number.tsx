@@ -91,7 +91,7 @@ export function AdjustableNumber({
   };
 
   return (
-    <span className="relative inline-block">
+    <span className="relative mr-[0.1em] inline-block">
       <input
         ref={input}
         role="spinbutton"

@@ -2,7 +2,7 @@ import { createStore, type StoreApi } from 'zustand/vanilla';
 import { benchRequest } from '@/lib/shared/bench-study';
 import type { StudyFile } from '@/lib/shared/study-types';
 import type { TypesetFormula } from '@/lib/shared/typeset-types';
-import { type ExploreState, edited, firstState, pictured, redone, refused, undone } from './explore-core';
+import { type ExploreState, edited, firstState, type Picture, pictured, redone, refused, undone } from './explore-core';
 import { KernelClient, type KernelHost } from './kernel-client';
 
 export interface ExploreActions {
@@ -27,13 +27,16 @@ export interface Timers {
 /** How long nothing has to move before the full pass, which alone has uncertainties, begins. */
 export const REST_MS = 120;
 
+export interface ExploreBeginning {
+  study: StudyFile;
+  /** Typed formulas that the server has laid out already. */
+  typesets?: Record<string, TypesetFormula>;
+  /** A picture computed ahead, shown until the first pass is done. */
+  picture?: Picture | null;
+}
+
 /** One store per page: nothing of it outlives the page or is shared between requests. */
-export function createExploreStore(
-  study: StudyFile,
-  host: KernelHost,
-  timers: Timers,
-  typesets: Record<string, TypesetFormula> = {},
-): ExploreStore {
+export function createExploreStore(from: ExploreBeginning, host: KernelHost, timers: Timers): ExploreStore {
   let cancelRest = () => {};
   const store = createStore<ExploreState & ExploreActions>()((set, get) => {
     const kernel = new KernelClient(host, {
@@ -56,8 +59,9 @@ export function createExploreStore(
       });
     };
     return {
-      ...firstState(study),
-      typesets,
+      ...firstState(from.study),
+      typesets: from.typesets ?? {},
+      picture: from.picture ?? null,
       kernel,
       edit(change, moving = false) {
         set(edited(get(), change(get().study), moving));
@@ -76,7 +80,7 @@ export function createExploreStore(
         cancelRest();
         kernel.stop();
       },
-      start: computeAndRest,
+      start: () => (get().picture ? compute('full') : computeAndRest()),
       keepTypeset: (text, formula) => set({ typesets: { ...get().typesets, [text]: formula } }),
       dispose() {
         cancelRest();
