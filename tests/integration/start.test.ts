@@ -45,6 +45,16 @@ describe('npm start', () => {
     expect(existsSync(`${data}/running.json`)).toBe(false);
   });
 
+  test('stops in order when npm itself is asked to', async () => {
+    const started = await start(data, { throughNpm: true });
+    expect(await ready(started), started.output()).toBe(true);
+    const { web, database } = serversOf(data);
+    started.signal('SIGTERM');
+    await started.ended;
+    expect([isAlive(web), isAlive(database)]).toEqual([false, false]);
+    expect(started.output()).toContain('Stopped.');
+  });
+
   test('a second start without changes is ready in under ten seconds', async () => {
     const since = performance.now();
     const started = await start(data);

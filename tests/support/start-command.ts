@@ -6,9 +6,13 @@ import { processRecord } from '@/lib/ops/processes.mjs';
 export type Started = Awaited<ReturnType<typeof runStart>>;
 
 /** Runs the start command with a data folder and a port of its own; resolves once it is ready or has ended. */
-export async function runStart(data: string, more: { port?: number; env?: Record<string, string> } = {}) {
+export async function runStart(
+  data: string,
+  more: { port?: number; env?: Record<string, string>; throughNpm?: boolean } = {},
+) {
   const port = more.port ?? (await freePort());
-  const child = spawn(process.execPath, ['lib/ops/start.mjs'], {
+  const [command, ...args] = more.throughNpm ? ['npm', 'start'] : [process.execPath, 'lib/ops/start.mjs'];
+  const child = spawn(command, args, {
     // As on a bare machine: a path, and nothing else of the caller's.
     env: { PATH: process.env.PATH ?? '', NODE_ENV: 'production', SMIRR_DATA: data, PORT: String(port), ...more.env },
     stdio: ['ignore', 'pipe', 'pipe'],
