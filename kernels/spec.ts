@@ -70,54 +70,100 @@ const grid = z.strictObject({
 
 const start = z.discriminatedUnion('kind', [
   z.strictObject({ kind: z.literal('uniform') }),
-  z.strictObject({ kind: z.literal('gaussian'), mean: z.array(finite).min(1).max(2), sd: z.array(positive).min(1).max(2) }),
+  z.strictObject({
+    kind: z.literal('gaussian'),
+    mean: z.array(finite).min(1).max(2),
+    sd: z.array(positive).min(1).max(2),
+  }),
   z.strictObject({ kind: z.literal('point'), at: z.array(finite).min(1).max(2) }),
   z.strictObject({ kind: z.literal('formula'), formula }),
-  z.strictObject({ kind: z.literal('samples'), samples: z.array(z.union([finite, z.array(finite).min(1).max(2)])).min(1).max(LIMITS.samples) }),
+  z.strictObject({
+    kind: z.literal('samples'),
+    samples: z
+      .array(z.union([finite, z.array(finite).min(1).max(2)]))
+      .min(1)
+      .max(LIMITS.samples),
+  }),
 ]);
 
-const observable = z.strictObject({ observable: formula, lags: z.union([
-  z.number().int().min(1).max(LIMITS.lags),
-  z.strictObject({ count: z.number().int().min(1).max(LIMITS.lags), step: positive }),
-]) });
-
-const ask = z.strictObject({
-  density: z.strictObject({ start: start.default({ kind: 'uniform' }), at: z.array(z.number().min(0).max(1e7)).min(1).max(LIMITS.at) }).optional(),
-  stationary: z.strictObject({ deterministic: z.boolean().default(false) }).optional(),
-  spectrum: z.strictObject({
-    count: z.number().int().min(1).max(LIMITS.eigenvalues).default(8),
-    deterministic: z.boolean().default(false),
-    method: z.enum(['auto', 'cells', 'collocation']).default('auto'),
-  }).optional(),
-  exit: z.strictObject({
-    start: start.default({ kind: 'uniform' }),
-    inside: formula.optional(),
-    survival: z.strictObject({ horizon: positive, devices: z.number().int().min(1).max(1e12).default(1) }).optional(),
-  }).optional(),
-  lyapunov: z.strictObject({}).optional(),
-  correlation: observable.optional(),
-  powerSpectrum: z.strictObject({ observable: formula, frequencies: z.array(z.number().min(0).max(1e300)).min(1).max(LIMITS.frequencies) }).optional(),
-  ensemble: z.strictObject({
-    start: start.default({ kind: 'uniform' }),
-    paths: z.number().int().min(1).max(LIMITS.paths),
-    steps: z.number().int().min(1).max(LIMITS.steps),
-    dt: positive.optional(),
-    seed: z.string().min(1).max(200),
-  }).optional(),
-  sensitivity: z.strictObject({ of: z.array(z.string().min(1).max(60)).min(1).max(20), to: z.array(z.string().min(1).max(60)).min(1).max(40) }).optional(),
-  target: z.strictObject({
-    quantity: z.string().min(1).max(60),
-    atLeast: finite.optional(),
-    atMost: finite.optional(),
-    by: z.string().min(1).max(60),
-    between: z.tuple([finite, finite]),
-  }).optional(),
+const observable = z.strictObject({
+  observable: formula,
+  lags: z.union([
+    z.number().int().min(1).max(LIMITS.lags),
+    z.strictObject({ count: z.number().int().min(1).max(LIMITS.lags), step: positive }),
+  ]),
 });
 
-const over = z.string().regex(/^(noise\.sigma(\[[01]\])?|noise\.correlation|parameters\.[A-Za-z][A-Za-z0-9_]*)$/,
-  'allowed: noise.sigma, noise.sigma[0], noise.sigma[1], noise.correlation, parameters.NAME');
+const ask = z.strictObject({
+  density: z
+    .strictObject({
+      start: start.default({ kind: 'uniform' }),
+      at: z.array(z.number().min(0).max(1e7)).min(1).max(LIMITS.at),
+    })
+    .optional(),
+  stationary: z.strictObject({ deterministic: z.boolean().default(false) }).optional(),
+  spectrum: z
+    .strictObject({
+      count: z.number().int().min(1).max(LIMITS.eigenvalues).default(8),
+      deterministic: z.boolean().default(false),
+      method: z.enum(['auto', 'cells', 'collocation']).default('auto'),
+    })
+    .optional(),
+  exit: z
+    .strictObject({
+      start: start.default({ kind: 'uniform' }),
+      inside: formula.optional(),
+      survival: z.strictObject({ horizon: positive, devices: z.number().int().min(1).max(1e12).default(1) }).optional(),
+    })
+    .optional(),
+  lyapunov: z.strictObject({}).optional(),
+  correlation: observable.optional(),
+  powerSpectrum: z
+    .strictObject({
+      observable: formula,
+      frequencies: z.array(z.number().min(0).max(1e300)).min(1).max(LIMITS.frequencies),
+    })
+    .optional(),
+  ensemble: z
+    .strictObject({
+      start: start.default({ kind: 'uniform' }),
+      paths: z.number().int().min(1).max(LIMITS.paths),
+      steps: z.number().int().min(1).max(LIMITS.steps),
+      dt: positive.optional(),
+      seed: z.string().min(1).max(200),
+    })
+    .optional(),
+  sensitivity: z
+    .strictObject({
+      of: z.array(z.string().min(1).max(60)).min(1).max(20),
+      to: z.array(z.string().min(1).max(60)).min(1).max(40),
+    })
+    .optional(),
+  target: z
+    .strictObject({
+      quantity: z.string().min(1).max(60),
+      atLeast: finite.optional(),
+      atMost: finite.optional(),
+      by: z.string().min(1).max(60),
+      between: z.tuple([finite, finite]),
+    })
+    .optional(),
+});
+
+const over = z
+  .string()
+  .regex(
+    /^(noise\.sigma(\[[01]\])?|noise\.correlation|parameters\.[A-Za-z][A-Za-z0-9_]*)$/,
+    'allowed: noise.sigma, noise.sigma[0], noise.sigma[1], noise.correlation, parameters.NAME',
+  );
 const axis = z.union([
-  z.strictObject({ over, from: finite, to: finite, count: z.number().int().min(2).max(LIMITS.sweepAxis), scale: z.enum(['linear', 'log']).default('linear') }),
+  z.strictObject({
+    over,
+    from: finite,
+    to: finite,
+    count: z.number().int().min(2).max(LIMITS.sweepAxis),
+    scale: z.enum(['linear', 'log']).default('linear'),
+  }),
   z.strictObject({ over, values: z.array(finite).min(1).max(LIMITS.sweepAxis) }),
 ]);
 

@@ -21,7 +21,8 @@ export class SymmetricConvolution {
 
   /** @param length number of points of the circle, a power of two from 8 up; throws RangeError otherwise */
   constructor(length: number) {
-    if (!Number.isInteger(Math.log2(length)) || length < 8) throw new RangeError(`length ${length}: allowed are powers of two from 8 up`);
+    if (!Number.isInteger(Math.log2(length)) || length < 8)
+      throw new RangeError(`length ${length}: allowed are powers of two from 8 up`);
     this.length = length;
     this.half = length / 2;
     this.fft = new FFT(this.half);

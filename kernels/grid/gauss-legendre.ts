@@ -17,7 +17,8 @@ const cache = new Map<number, Rule>();
  * @see Abramowitz & Stegun, Handbook of Mathematical Functions, 1964, eq. 25.4.29 (weights 2/((1−x²) P'_n(x)²))
  */
 export function gaussLegendre(order: number): Rule {
-  if (!Number.isInteger(order) || order < 1 || order > 512) throw new RangeError(`order ${order}: allowed are whole numbers from 1 to 512`);
+  if (!Number.isInteger(order) || order < 1 || order > 512)
+    throw new RangeError(`order ${order}: allowed are whole numbers from 1 to 512`);
   const known = cache.get(order);
   if (known) return known;
   const nodes = new Float64Array(order);

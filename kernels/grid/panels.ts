@@ -48,36 +48,70 @@ export function panelGrid(edges: readonly number[], orders: number | readonly nu
   return { x, weights, panels };
 }
 
+/** How much of a need lies below each of the samples of a piece; made once, cut as often as wanted. */
+export interface Need {
+  readonly pieces: readonly number[];
+  /** per piece SAMPLES + 1 increasing entries, first 0 */
+  readonly cumulative: readonly Float64Array[];
+}
+
+const SAMPLES = 256;
+
 /**
- * Cuts pieces into intervals so that each holds about the same share of a given need.
+ * Samples a need, in intervals wanted per unit length, over pieces of the domain.
  *
- * @param pieces increasing positions that must be edges (domain ends, breaks, critical points)
- * @param need intervals wanted per unit length at a position, > 0 and finite; sampled, so it may jump at edges
+ * @param pieces increasing positions that must be edges (domain ends, breaks, singular points)
+ * @param need out ← the need at each position, > 0 and finite; it may jump at edges
+ * @returns cumulative need per piece, by the midpoint rule over neighbours' maxima, so that a steep rise is not averaged away
+ */
+export function sampleNeed(pieces: readonly number[], need: (x: Float64Array, out: Float64Array) => void): Need {
+  const count = pieces.length - 1;
+  const x = new Float64Array(count * SAMPLES);
+  for (let i = 0; i < count; i++) {
+    const width = pieces[i + 1] - pieces[i];
+    for (let k = 0; k < SAMPLES; k++) x[i * SAMPLES + k] = pieces[i] + (width * (k + 0.5)) / SAMPLES;
+  }
+  const raw = new Float64Array(x.length);
+  need(x, raw);
+  const cumulative = Array.from({ length: count }, (_, i) => {
+    const own = raw.subarray(i * SAMPLES, (i + 1) * SAMPLES);
+    const step = (pieces[i + 1] - pieces[i]) / SAMPLES;
+    const sums = new Float64Array(SAMPLES + 1);
+    for (let k = 0; k < SAMPLES; k++) {
+      const local = Math.max(own[k], own[Math.max(0, k - 1)], own[Math.min(SAMPLES - 1, k + 1)]);
+      sums[k + 1] = sums[k] + local * step;
+    }
+    return sums;
+  });
+  return { pieces, cumulative };
+}
+
+const intervalsOf = (sums: Float64Array, factor: number) => Math.max(1, Math.ceil(factor * sums[SAMPLES] - 1e-9));
+
+/** Number of intervals that `cutByNeed` makes for a factor. */
+export function countByNeed({ cumulative }: Need, factor: number): number {
+  return cumulative.reduce((sum, sums) => sum + intervalsOf(sums, factor), 0);
+}
+
+/**
+ * Cuts pieces into intervals so that each holds about the same share of the need.
+ *
  * @param factor multiplies the need; a larger factor gives more intervals
  * @returns edges, pieces among them
  */
-export function cutByNeed(pieces: readonly number[], need: (x: number) => number, factor = 1): number[] {
+export function cutByNeed({ pieces, cumulative }: Need, factor: number): number[] {
   const edges = [pieces[0]];
-  const SAMPLES = 256;
-  for (let i = 0; i + 1 < pieces.length; i++) {
-    const from = pieces[i];
-    const width = pieces[i + 1] - from;
-    // cumulative need by the midpoint rule, with neighbours' maximum so that a steep rise is not averaged away
-    const raw = Array.from({ length: SAMPLES }, (_, k) => need(from + (width * (k + 0.5)) / SAMPLES));
-    const local = raw.map((v, k) => Math.max(v, raw[Math.max(0, k - 1)], raw[Math.min(SAMPLES - 1, k + 1)]));
-    const cumulative = [0];
-    for (let k = 0; k < SAMPLES; k++) cumulative.push(cumulative[k] + (factor * local[k] * width) / SAMPLES);
-    const total = cumulative[SAMPLES];
-    const count = Math.max(1, Math.ceil(total - 1e-9));
+  cumulative.forEach((sums, i) => {
+    const step = (pieces[i + 1] - pieces[i]) / SAMPLES;
+    const count = intervalsOf(sums, factor);
     let k = 0;
     for (let c = 1; c < count; c++) {
-      const wanted = (c * total) / count;
-      while (cumulative[k + 1] < wanted) k++;
-      const inside = (wanted - cumulative[k]) / (cumulative[k + 1] - cumulative[k]);
-      edges.push(from + (width * (k + inside)) / SAMPLES);
+      const wanted = (c * sums[SAMPLES]) / count;
+      while (sums[k + 1] < wanted) k++;
+      edges.push(pieces[i] + step * (k + (wanted - sums[k]) / (sums[k + 1] - sums[k])));
     }
     edges.push(pieces[i + 1]);
-  }
+  });
   return edges;
 }
 

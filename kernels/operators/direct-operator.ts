@@ -12,6 +12,8 @@ import type { OperatorPair } from './operator-pair';
  * - `images` folded images y_j of the nodes (n, see `foldImage`)
  * - `density` noise density at a distance, per unit; even
  * - `reach` distance beyond which it is left out, > 0
+ * - `sourceWeights` quadrature weights of the images where these do not belong to the nodes; then `x` may be any
+ *   increasing positions and `apply` takes values at the sources (`applyAdjoint` and `toDense` are for the square case)
  *
  * Cost: one density evaluation a stored entry to build, one multiplication an entry to apply. Accuracy: that of the
  * quadrature; nothing is added to it.
@@ -26,11 +28,21 @@ export class DirectOperator implements OperatorPair {
   private readonly offset: Int32Array;
   private readonly entries: Float64Array;
   private readonly mass: Float64Array;
+  private readonly sourceWeights: Float64Array;
 
-  constructor(x: Float64Array, weights: Float64Array, images: Float64Array, boundary: Boundary, density: (d: number) => number, reach: number) {
+  constructor(
+    x: Float64Array,
+    weights: Float64Array,
+    images: Float64Array,
+    boundary: Boundary,
+    density: (d: number) => number,
+    reach: number,
+    sourceWeights = weights,
+  ) {
     const n = x.length;
     this.size = n;
     this.weights = weights;
+    this.sourceWeights = sourceWeights;
     this.mass = new Float64Array(n);
     const list = imagesOf(boundary, reach);
     const source: number[] = [];
@@ -46,13 +58,14 @@ export class DirectOperator implements OperatorPair {
       entries = larger;
     };
     const whole = reach > boundary.to - boundary.from; // images overlap: one full column is cheaper than many stretches
-    for (let j = 0; j < n; j++) {
+    for (let j = 0; j < images.length; j++) {
       const y = images[j];
       if (Number.isNaN(y)) continue;
       if (whole) {
         room(n);
         entries.fill(0, used, used + n);
-        for (const { sign, shift } of list) for (let i = 0; i < n; i++) entries[used + i] += density(sign * x[i] + shift - y);
+        for (const { sign, shift } of list)
+          for (let i = 0; i < n; i++) entries[used + i] += density(sign * x[i] + shift - y);
         source.push(j);
         low.push(0);
         high.push(n);
@@ -88,10 +101,10 @@ export class DirectOperator implements OperatorPair {
   }
 
   apply(rho: Float64Array, out: Float64Array): void {
-    const { source, low, high, offset, entries, weights } = this;
+    const { source, low, high, offset, entries, sourceWeights } = this;
     out.fill(0);
     for (let s = 0; s < source.length; s++) {
-      const m = rho[source[s]] * weights[source[s]];
+      const m = rho[source[s]] * sourceWeights[source[s]];
       if (m === 0) continue;
       const shift = offset[s] - low[s];
       for (let i = low[s]; i < high[s]; i++) out[i] += m * entries[i + shift];

@@ -1,4 +1,13 @@
-import { copyHead, prepareSpread, readFrom, SPREAD_WIDTH, type Spread, spreadOnto, spreadTransform, wrapTail } from '../fft/spread-kernel';
+import {
+  copyHead,
+  prepareSpread,
+  readFrom,
+  SPREAD_WIDTH,
+  type Spread,
+  spreadOnto,
+  spreadTransform,
+  wrapTail,
+} from '../fft/spread-kernel';
 import { SymmetricConvolution } from '../fft/symmetric-convolution';
 import type { Boundary } from './ends';
 import type { OperatorPair } from './operator-pair';
@@ -12,6 +21,7 @@ export const LINE_POINTS_PER_SIGMA = 2.8;
  *
  * - `x`, `weights` nodes of the domain and quadrature weights (n)
  * - `images` folded images of the nodes (n)
+ * - `extent` lowest and highest image of any position of the domain, folded
  * - `smallest`, `largest` the range of sigma served, 0 < smallest ≤ largest
  * - `reach` multiples of sigma beyond which noise counts as zero
  *
@@ -24,13 +34,26 @@ export class Push {
   readonly convolution: SymmetricConvolution;
   readonly transform: Float64Array;
   readonly spacing: number;
+  /** distance beyond an absorbing end from which noise brings nothing back */
+  readonly farthest: number;
+  /** position of point 0 of the line */
+  readonly anchor: number;
   readonly mirrored: boolean;
   readonly sources: Spread;
   readonly targets: Spread;
   readonly smallest: number;
   readonly largest: number;
 
-  constructor(x: Float64Array, weights: Float64Array, images: Float64Array, boundary: Boundary, smallest: number, largest: number, reach: number) {
+  constructor(
+    x: Float64Array,
+    weights: Float64Array,
+    images: Float64Array,
+    extent: readonly [number, number],
+    boundary: Boundary,
+    smallest: number,
+    largest: number,
+    reach: number,
+  ) {
     this.x = x;
     this.weights = weights;
     this.smallest = smallest;
@@ -38,31 +61,36 @@ export class Push {
     const { from, to, periodic, low, high } = boundary;
     const length = to - from;
     const far = reach * largest;
+    this.farthest = periodic || (low === 'reflecting' && high === 'reflecting') ? Number.POSITIVE_INFINITY : far;
     const finest = smallest / LINE_POINTS_PER_SIGMA;
     let circle = periodic ? length : 2 * length;
     let anchor = from;
     const placed = Float64Array.from(images);
     this.mirrored = !periodic && (low === 'reflecting' || high === 'reflecting');
     if (!periodic && (low === 'absorbing' || high === 'absorbing')) {
-      let lowest = from;
-      let highest = to;
-      for (let i = 0; i < placed.length; i++) {
+      for (let i = 0; i < placed.length; i++)
         if (placed[i] < from - far || placed[i] > to + far) placed[i] = Number.NaN;
-        else if (placed[i] < lowest) lowest = placed[i];
-        else if (placed[i] > highest) highest = placed[i];
-      }
+      const lowest = Math.min(from, Math.max(from - far, extent[0]));
+      const highest = Math.max(to, Math.min(to + far, extent[1]));
       if (this.mirrored) circle = 2 * length + 2 * far;
       else circle = Math.max(highest - from, to - lowest) + far;
       if (high === 'reflecting') anchor = to;
     }
+    this.anchor = anchor;
     const least = Math.max(32, circle / finest);
     const points = 2 ** Math.ceil(Math.log2(least));
     // a circle of given length is cut into `points`; a padded line may as well be as fine as the points allow
     this.spacing = circle / points;
     this.convolution = new SymmetricConvolution(points);
     this.transform = spreadTransform(points);
-    this.sources = prepareSpread(placed.map((y) => (y - anchor) / this.spacing), points);
-    this.targets = prepareSpread(x.map((y) => (y - anchor) / this.spacing), points);
+    this.sources = prepareSpread(
+      placed.map((y) => (y - anchor) / this.spacing),
+      points,
+    );
+    this.targets = prepareSpread(
+      x.map((y) => (y - anchor) / this.spacing),
+      points,
+    );
   }
 }
 
@@ -111,17 +139,39 @@ export class SpreadOperator implements OperatorPair {
     this.carry(this.push.targets, observable, this.push.sources, out);
   }
 
+  /** out_i ← the density one step later at any prepared positions (`NoisyPlan.targetsAt`): interpolation without error of its own. */
+  read(rho: Float64Array, targets: Spread, out: Float64Array): void {
+    this.carry(this.push.sources, rho, targets, out);
+  }
+
+  /** out ← the density at prepared positions after point masses at any prepared images were blurred. */
+  launch(images: Spread, mass: Float64Array, targets: Spread, out: Float64Array): void {
+    this.blur(images, mass);
+    readFrom(targets, this.line, out);
+  }
+
+  /** out_i ← the observable's expectation after the noise, from any prepared images. */
+  expect(observable: Float64Array, images: Spread, out: Float64Array): void {
+    this.carry(this.push.targets, observable, images, out);
+  }
+
   private carry(from: Spread, values: Float64Array, to: Spread, out: Float64Array): void {
-    const { line, circle, mass, weights, push } = this;
-    const points = push.convolution.length;
+    const { mass, weights } = this;
     for (let i = 0; i < mass.length; i++) mass[i] = values[i] * weights[i];
+    this.blur(from, mass);
+    readFrom(to, this.line, out);
+  }
+
+  /** Spreads masses onto the line, convolves with the noise and folds by the ends. */
+  private blur(from: Spread, mass: Float64Array): void {
+    const { line, circle, push } = this;
+    const points = push.convolution.length;
     line.fill(0);
     spreadOnto(from, mass, line);
     wrapTail(line, points);
     push.convolution.apply(circle, this.multiplier);
     if (push.mirrored) mirror(circle);
     copyHead(line, points);
-    readFrom(to, line, out);
   }
 }
 

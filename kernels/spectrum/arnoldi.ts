@@ -54,7 +54,11 @@ export interface ArnoldiResult {
  * @see W. E. Arnoldi, Q. Appl. Math. 9, 1951, 17; K. Wu & H. Simon, SIAM J. Matrix Anal. Appl. 22, 2000, 602 (thick
  *   restart); G. W. Stewart, SIAM J. Matrix Anal. Appl. 23, 2001, 601 (Krylov decompositions)
  */
-export function arnoldi(apply: (v: Float64Array, out: Float64Array) => void, weights: Float64Array, options: ArnoldiOptions): ArnoldiResult {
+export function arnoldi(
+  apply: (v: Float64Array, out: Float64Array) => void,
+  weights: Float64Array,
+  options: ArnoldiOptions,
+): ArnoldiResult {
   const n = weights.length;
   const { count, tolerance, floor = 1e-13, restarts = 60, checkpoint = neverStop } = options;
   if (!(count >= 1)) throw new RangeError(`count ${count}: at least one eigenpair must be asked for`);
@@ -157,7 +161,13 @@ function settled(found: ReturnType<typeof ritz>, count: number, tolerance: numbe
   return true;
 }
 
-function collect(found: ReturnType<typeof ritz>, basis: Float64Array[], root: Float64Array, m: number, count: number): EigenPair[] {
+function collect(
+  found: ReturnType<typeof ritz>,
+  basis: Float64Array[],
+  root: Float64Array,
+  m: number,
+  count: number,
+): EigenPair[] {
   const pairs: EigenPair[] = [];
   const n = root.length;
   let j = 0;

@@ -1,4 +1,4 @@
-import { EigenvalueDecomposition, Matrix, inverse } from 'ml-matrix';
+import { EigenvalueDecomposition, inverse, Matrix } from 'ml-matrix';
 
 /** Eigenpairs of a small real matrix, largest modulus first, conjugate partners side by side (positive imaginary part first). */
 export interface SmallEigen {
@@ -64,7 +64,8 @@ function conditions(vectors: Matrix, im: Float64Array): Float64Array {
     let norm = 0;
     const pair = im[j] !== 0;
     // real form (a, b) of a pair: the complex left vector is (row_a − i row_b)/2
-    for (let i = 0; i < m; i++) norm += pair ? (dual.get(j, i) ** 2 + dual.get(j + 1, i) ** 2) / 4 : dual.get(j, i) ** 2;
+    for (let i = 0; i < m; i++)
+      norm += pair ? (dual.get(j, i) ** 2 + dual.get(j + 1, i) ** 2) / 4 : dual.get(j, i) ** 2;
     out[j] = Math.sqrt(norm);
     if (pair) out[++j] = Math.sqrt(norm);
   }

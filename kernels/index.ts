@@ -1,0 +1,10 @@
+export { type Checkpoint, Stopped } from './core/checkpoint';
+export type { Eigenvalue, Quantity, Result, ResultCase, Warning } from './result';
+export { resultSchema } from './result';
+export { type RunCache, type RunOptions, run, sweepPoints } from './run';
+export type { Ends, StartDensity, Study, StudyFile } from './spec';
+export { LIMITS, studySchema } from './spec';
+export type { Fault } from './study/fault';
+export { parseStudy } from './study/parse-study';
+export { StudyRefused } from './study/study-refused';
+export { ENGINE } from './version';

@@ -1,0 +1,62 @@
+import type { Eigenvalue, Quantity } from '../result';
+import type { EigenPair } from '../spectrum/arnoldi';
+import { bound } from './quantity';
+
+const EPS = 2.220446049250313e-16;
+
+/**
+ * Eigenvalues as a result states them, largest modulus first; one whose modulus is below its uncertainty is left out.
+ *
+ * Uncertainty: residual and round-off times the condition number, and the distance to the partner that the other grid
+ * gave, times two while the two agree well and five where they do not.
+ *
+ * @param pairs from the grid that is reported
+ * @param other from the second grid; null: no uncertainties
+ * @param norm of the operator, about 1, for the round-off part
+ */
+export function spectrumEntries(
+  pairs: readonly EigenPair[],
+  other: readonly EigenPair[] | null,
+  norm: number,
+): Eigenvalue[] {
+  const free = other ? [...other] : null;
+  const entries: Eigenvalue[] = [];
+  for (const p of pairs) {
+    const modulus = Math.hypot(p.re, p.im);
+    let uncertainty: number | null = null;
+    if (free) {
+      let nearest = -1;
+      let distance = Number.POSITIVE_INFINITY;
+      free.forEach((q, i) => {
+        const d = Math.hypot(p.re - q.re, p.im - q.im);
+        if (d < distance) [nearest, distance] = [i, d];
+      });
+      if (nearest >= 0) free.splice(nearest, 1);
+      const roundOff = (p.residual + 4 * EPS * norm) * Math.max(1, p.condition);
+      uncertainty = (distance <= 1e-9 ? 2 : 5) * Math.min(distance, 1) + roundOff;
+      if (!(uncertainty < modulus)) continue;
+    } else if (modulus < 1e-13 * norm * Math.min(1e6, Math.max(1, p.condition))) continue;
+    entries.push({ re: p.re, im: p.im, modulus, residual: p.residual, uncertainty, multiplicity: 1 });
+  }
+  return entries;
+}
+
+/**
+ * Spectral gap 1 − |λ₂|/|λ₁| and relaxation time −1/ln(|λ₂|/|λ₁|) in steps, with propagated uncertainties.
+ *
+ * @param entries eigenvalues, largest modulus first; null for both where there is no second one above its uncertainty
+ */
+export function gapOf(entries: readonly Eigenvalue[]): { gap: Quantity | null; relaxationTime: Quantity | null } {
+  const [first, second] = entries;
+  if (!first || !second) return { gap: null, relaxationTime: null };
+  const ratio = second.modulus / first.modulus;
+  const blur =
+    first.uncertainty === null || second.uncertainty === null
+      ? null
+      : (second.uncertainty + ratio * first.uncertainty) / first.modulus;
+  const log = Math.log(ratio);
+  return {
+    gap: bound(1 - ratio, blur),
+    relaxationTime: bound(-1 / log, blur === null ? null : blur / (ratio * log * log)),
+  };
+}
