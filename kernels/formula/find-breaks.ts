@@ -40,7 +40,17 @@ interface Search {
   maxBreaks: number;
   value(tree: FormulaTree, x: number): number;
   done: Map<FormulaTree, Marks>;
+  /** operations on single numbers that may still be spent */
+  work: number;
 }
+
+/** Work after which the search stops and says so: half a second or so. */
+const MOST_WORK = 5e7;
+/** A single evaluation costs as much as this many operations in a block, and so many more per node. */
+const SINGLE = 400;
+const SINGLE_PER_NODE = 40;
+/** Breaks beyond this number are left out. */
+const MOST_MARKS = 2000;
 
 /**
  * Where a formula of one variable is not smooth: zeros and whole-number crossings of what its abs, sign, floor, ceil,
@@ -55,7 +65,8 @@ interface Search {
  * @returns the breaks; each to the last bit where its function has a simple zero there. Those of a branch that is not taken
  *   are left out. What happens within (to - from)/4096 and leaves no trace in values or slopes can be missed.
  * @throws RangeError where the interval is empty or the scope has not exactly one variable.
- *   Cost: per deciding part 4096 evaluations, 0.1 ms or so, and some 55 more per break.
+ *   Cost: per deciding part 4096 evaluations, 0.1 ms or so, and some 12 more per break; it stops after half a second or so,
+ *   with `complete` false.
  */
 export function findBreaks(
   tree: FormulaTree,
@@ -78,6 +89,7 @@ export function findBreaks(
     maxBreaks: options.maxBreaks ?? 400,
     value: (part, x) => evaluatePoint(part, (name) => (name === variable ? x : (named.get(name) as number))),
     done: new Map(),
+    work: MOST_WORK,
   };
   const marks = marksOf(tree, search);
   const breaks = merge(marks.breaks, MERGE * (to - from)).filter(({ at }) => inside(at, search));
@@ -106,7 +118,7 @@ function marksOf(tree: FormulaTree, search: Search): Marks {
   search.done.set(tree, marks);
   if (!varies(tree)) return marks;
   const add = (part: Marks, keep: (at: number) => boolean = () => true) => {
-    marks.breaks.push(...part.breaks.filter(({ at }) => keep(at)));
+    for (const mark of part.breaks) if (keep(mark.at)) marks.breaks.push(mark);
     for (const gap of part.gaps) if (keep(gap.at)) addGap(marks.gaps, gap);
     marks.complete &&= part.complete;
   };
@@ -118,6 +130,10 @@ function marksOf(tree: FormulaTree, search: Search): Marks {
     );
   }
   marks.breaks = merge(marks.breaks, MERGE * (search.to - search.from));
+  if (marks.breaks.length > MOST_MARKS) {
+    marks.breaks.length = MOST_MARKS;
+    marks.complete = false;
+  }
   return marks;
 }
 
@@ -167,7 +183,10 @@ function crossingsOf(part: FormulaTree, levels: Levels, kind: BreakKind, search:
   if (!varies(part)) return marks;
   const span = to - from;
   const curve = curveOf(part, scope, parameters);
-  const swings = isPeriodic(part);
+  const poles = isPeriodic(part)
+    ? new Set(own.breaks.filter((mark) => mark.kind === 'pole').map(({ at }) => at))
+    : null;
+  const nodes = size(part);
   const searchPanel = (low: number, high: number, lowRuns: boolean, highRuns: boolean): Crossings[] => {
     const middle = (low + high) / 2;
     if (lowRuns && highRuns)
@@ -179,16 +198,24 @@ function crossingsOf(part: FormulaTree, levels: Levels, kind: BreakKind, search:
   const bounds = [from, ...own.breaks.map(({ at }) => at).filter((at) => at > from && at < to), to];
   for (let k = 0; k + 1 < bounds.length; k++) {
     const [low, high] = [bounds[k], bounds[k + 1]];
+    if (search.work <= 0 || marks.breaks.length > MOST_MARKS) {
+      marks.complete = false;
+      break;
+    }
     if (own.gaps.some((gap) => low >= gap.from && high <= gap.to)) continue;
-    const runsAway = (end: number) => swings && own.breaks.some(({ at, kind: mark }) => mark === 'pole' && at === end);
+    const runsAway = (end: number) => poles?.has(end) === true;
     for (const found of searchPanel(low, high, runsAway(low), runsAway(high))) {
-      marks.breaks.push(...found.at.map((at) => ({ at, kind })));
+      for (const at of found.at) marks.breaks.push({ at, kind });
       for (const gap of found.accumulations) addGap(marks.gaps, gap);
       marks.complete &&= found.complete;
+      search.work -= found.samples * nodes + found.singles * (SINGLE + SINGLE_PER_NODE * nodes);
     }
   }
   // At its own breaks a part may jump over a level, or have it as a one-sided value.
   for (const { at } of own.breaks) {
+    if (search.work <= 0) marks.complete = false;
+    if (search.work <= 0) break;
+    search.work -= 2 * (SINGLE_PER_NODE * nodes);
     const [below, above] = nearby(at, search).map((x) => search.value(part, x));
     if (crosses(below, above, levels)) marks.breaks.push({ at, kind });
   }
@@ -210,13 +237,15 @@ function isPeriodic(tree: FormulaTree): boolean {
  * many, the samples no longer resolve them, or the distance left is below the resolution.
  */
 function searchOctaves(curve: Curve, end: number, far: number, levels: Levels, search: Search): Crossings {
-  const all: Crossings = { at: [], accumulations: [], complete: true };
+  const all: Crossings = { at: [], accumulations: [], complete: true, samples: 0, singles: 0 };
   const resolution = MERGE * (search.to - search.from);
   let outer = far;
   while (Math.abs(outer - end) > resolution) {
     const inner = end + (outer - end) / 2;
     const [low, high] = inner < outer ? [inner, outer] : [outer, inner];
     const found = findCrossings(curve, low, high, levels, OCTAVE_SAMPLES, search.maxBreaks, resolution);
+    all.samples += found.samples;
+    all.singles += found.singles;
     if (all.at.length + found.at.length > search.maxBreaks || found.at.length > OCTAVE_SAMPLES / 8) {
       all.accumulations.push({ at: end, from: Math.min(end, outer), to: Math.max(end, outer) });
       return all;
@@ -234,6 +263,10 @@ function crosses(below: number, above: number, levels: Levels): boolean {
   const side = (value: number) => Math.floor(value - levels.offset);
   const level = Math.round(below - levels.offset) + levels.offset;
   return side(below) !== side(above) || Math.abs(below - level) < 1e-11 * Math.max(1, Math.abs(level));
+}
+
+function size(tree: FormulaTree): number {
+  return children(tree).reduce((sum, child) => sum + size(child), 1);
 }
 
 function addGap(gaps: Marks['gaps'], gap: Marks['gaps'][number]): void {

@@ -10,6 +10,8 @@ const SAMPLES = 4096;
 const LEAST_SAMPLES = 64;
 /** Places closer than this part of the interval are one. */
 const MERGE = 1e-13;
+/** More critical points than this come from a map that swings between the samples: the rest would say nothing. */
+const MOST = 1000;
 const GOLDEN = (Math.sqrt(5) - 1) / 2;
 
 /**
@@ -22,7 +24,7 @@ const GOLDEN = (Math.sqrt(5) - 1) / 2;
  * @returns the places, ends and breaks included where they are such, increasing and at least 1e-13 (to - from) apart.
  *   A simple zero is found to the last bits that the derivative's own round-off leaves, a zero without change of sign to the
  *   accuracy with which the derivative is computed close to it (to the last bits for x^3 and (x - c)^3).
- *   Two zeros within (to - from)/4096 of one another can be missed.
+ *   Two zeros within (to - from)/4096 of one another can be missed; beyond 1000 places the search ends.
  *   Cost: some 4096 evaluations in blocks, and about 55 single ones per zero.
  */
 export function findCriticalPoints(map: SlopedMap, from: number, to: number, breaks: readonly number[]): number[] {
@@ -60,7 +62,7 @@ function searchPiece(
   if (scale === 0) return;
 
   const size = (at: number) => Math.abs(slopeAt(at));
-  for (let i = 0; i < samples; i++) {
+  for (let i = 0; i < samples && found.length < MOST; i++) {
     const [left, right] = [slope[i], slope[i + 1]];
     if (left === 0 && i > 0) found.push(x[i]);
     else if (left * right < 0) {
@@ -70,6 +72,8 @@ function searchPiece(
     } else if (
       i > 0 &&
       left * right > 0 &&
+      // A slope that touches zero between two samples is of the order of the squared distance there.
+      Math.abs(left) < 1e-3 * scale &&
       Math.abs(left) <= Math.abs(right) &&
       Math.abs(left) < Math.abs(slope[i - 1])
     ) {
