@@ -93,6 +93,7 @@ export function findCrossings(
     // A sample right on a level belongs to no stretch.
     if (
       i > 0 &&
+      Math.abs(value[i]) < LARGEST &&
       value[i] === nearestLevel(value[i], levels) &&
       value[i - 1] !== value[i] &&
       value[i + 1] !== value[i]

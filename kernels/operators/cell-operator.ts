@@ -45,16 +45,32 @@ export class CellOperator implements OperatorPair {
       crossings.atLow,
       crossings.target,
     );
-    const entries: { column: number; row: number; share: number }[] = [];
+    this.column = new Int32Array(cells + 1);
+    const row: number[] = [];
+    const share: number[] = [];
+    // parts come cell by cell: entries of one column are gathered, then sorted and added up
+    let gathered: { row: number; share: number }[] = [];
+    const close = (column: number) => {
+      gathered.sort((a, b) => a.row - b.row);
+      gathered.forEach((entry, i) => {
+        if (i > 0 && gathered[i - 1].row === entry.row) share[share.length - 1] += entry.share;
+        else {
+          row.push(entry.row);
+          share.push(entry.share);
+        }
+      });
+      gathered = [];
+      this.column[column + 1] = row.length;
+    };
     const put = (column: number, image: number, length: number) => {
-      const share = length / h;
-      const row = cellOf(image, boundary, cells);
-      if (row < 0) this.lost[column] += share;
-      else entries.push({ column, row, share });
+      const target = cellOf(image, boundary, cells);
+      if (target < 0) this.lost[column] += length / h;
+      else gathered.push({ row: target, share: length / h });
     };
     let c = 0;
-    for (let p = 0; p < parts.length; p++) {
-      const part = parts[p];
+    let open = 0;
+    for (const part of parts) {
+      while (open < part.cell) close(open++);
       const rising = part.valueHigh >= part.valueLow;
       let left = part.low;
       let k = part.first;
@@ -67,21 +83,7 @@ export class CellOperator implements OperatorPair {
       }
       put(part.cell, part.count === 0 ? part.only : rising ? k - 1 : k, Math.max(0, part.high - left));
     }
-    entries.sort((a, b) => a.column - b.column || a.row - b.row);
-    this.column = new Int32Array(cells + 1);
-    const row: number[] = [];
-    const share: number[] = [];
-    for (let i = 0; i < entries.length; i++) {
-      const e = entries[i];
-      const last = i > 0 && entries[i - 1].column === e.column && entries[i - 1].row === e.row;
-      if (last) share[share.length - 1] += e.share;
-      else {
-        row.push(e.row);
-        share.push(e.share);
-      }
-      this.column[e.column + 1] = row.length;
-    }
-    for (let j = 1; j <= cells; j++) this.column[j] = Math.max(this.column[j], this.column[j - 1]);
+    while (open < cells) close(open++);
     this.row = Int32Array.from(row);
     this.share = Float64Array.from(share);
   }
@@ -114,6 +116,20 @@ export class CellOperator implements OperatorPair {
         dense[this.row[e] * n + j] += this.share[e] / this.weights[j];
     return dense;
   }
+}
+
+/**
+ * How often the images of all cells together cross the domain: entries of a cell matrix are about this times the cells.
+ *
+ * @returns total variation of the map over the length of the domain, what lies beyond absorbing ends left out
+ */
+export function crossingsOfDomain(model: MapModel, boundary: Boundary): number {
+  const SAMPLES = 1024;
+  const parts = monotoneParts(model, boundary, SAMPLES);
+  const { from, to } = boundary;
+  const clip = (v: number) =>
+    boundary.low === 'absorbing' && boundary.high === 'absorbing' ? Math.min(to, Math.max(from, v)) : v;
+  return parts.reduce((sum, p) => sum + Math.abs(clip(p.valueHigh) - clip(p.valueLow)), 0) / (to - from);
 }
 
 /** A stretch inside one cell on which the map is monotone. */

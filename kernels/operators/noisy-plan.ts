@@ -96,12 +96,11 @@ export class NoisyPlan {
    */
   stretch(): { x: Float64Array; targets: Spread; weights: Float64Array } {
     if (!this.stretching) {
-      const fine = stretchGrid(this.grid, this.model.singular);
-      const value = new Float64Array(fine.x.length);
-      const slope = new Float64Array(fine.x.length);
-      this.model.evaluate(fine.x, value, slope);
+      const fine = stretchGrid(this.grid, this.model.stretchSingular);
+      const logs = new Float64Array(fine.x.length);
+      this.model.stretch(fine.x, logs);
       // a slope that rounds to exactly zero lies within 1e-16 of the singular point and weighs as little
-      const weights = fine.weights.map((w, i) => (slope[i] === 0 ? 0 : w * Math.log(Math.abs(slope[i]))));
+      const weights = fine.weights.map((w, i) => (logs[i] === Number.NEGATIVE_INFINITY ? 0 : w * logs[i]));
       this.stretching = { x: fine.x, targets: this.targetsAt(fine.x), weights };
     }
     return this.stretching;

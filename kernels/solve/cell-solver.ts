@@ -104,18 +104,20 @@ export class CellSolver {
 /** ∫ ln|F'| dx over each cell. */
 function cellStretches(model: MapModel, { from, to }: Boundary, cells: number): Float64Array {
   const h = (to - from) / cells;
-  const edges = [...Array.from({ length: cells }, (_, i) => from + i * h), to, ...model.breaks, ...model.singular].sort(
-    (a, b) => a - b,
-  );
+  const edges = [
+    ...Array.from({ length: cells }, (_, i) => from + i * h),
+    to,
+    ...model.breaks,
+    ...model.stretchSingular,
+  ].sort((a, b) => a - b);
   const distinct = edges.filter((x, i) => i === 0 || x - edges[i - 1] > 1e-12 * h);
-  const grid = stretchGrid(panelGrid(distinct, 6), model.singular);
-  const value = new Float64Array(grid.x.length);
-  const slope = new Float64Array(grid.x.length);
-  model.evaluate(grid.x, value, slope);
+  const grid = stretchGrid(panelGrid(distinct, 6), model.stretchSingular);
+  const logs = new Float64Array(grid.x.length);
+  model.stretch(grid.x, logs);
   const out = new Float64Array(cells);
   for (let i = 0; i < grid.x.length; i++) {
     const cell = Math.min(cells - 1, Math.max(0, Math.floor((grid.x[i] - from) / h)));
-    if (slope[i] !== 0) out[cell] += grid.weights[i] * Math.log(Math.abs(slope[i]));
+    if (logs[i] !== Number.NEGATIVE_INFINITY) out[cell] += grid.weights[i] * logs[i];
   }
   return out;
 }

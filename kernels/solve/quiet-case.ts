@@ -1,6 +1,6 @@
 import type { Checkpoint } from '../core/checkpoint';
 import { panelGrid } from '../grid/panels';
-import { CellOperator } from '../operators/cell-operator';
+import { CellOperator, crossingsOfDomain } from '../operators/cell-operator';
 import type { Eigenvalue, Quantity, ResultCase, Warning } from '../result';
 import type { StartDensity, Study } from '../spec';
 import type { EigenPair } from '../spectrum/arnoldi';
@@ -15,6 +15,8 @@ type Warn = (w: Omit<Warning, 'at'>) => void;
 /** Cells that "auto" takes: errors fall like one over their number or slower, so a small tolerance asks for the most. */
 const FEWEST = 1024;
 const MOST = 65_536;
+/** Entries of a cell matrix that "auto" takes at most. */
+const MOST_ENTRIES = 1_500_000;
 /** … where a spectrum is asked for: finer cells crowd the circle that cells cannot see through, and bring no eigenvalue nearer. */
 const MOST_FOR_SPECTRUM = 4096;
 /** The coarser cells that uncertainties come from; no divisor of the finer, so that edges fall elsewhere. */
@@ -40,9 +42,14 @@ export function quietCase(
   warn: Warn,
 ): Omit<ResultCase, 'at'> {
   const { ask } = study;
+  const { model, boundary } = setup;
   const fine =
     setup.points === 'auto'
-      ? Math.min(ask.spectrum ? MOST_FOR_SPECTRUM : MOST, Math.max(FEWEST, Math.ceil(1 / study.grid.tolerance)))
+      ? Math.min(
+          ask.spectrum ? MOST_FOR_SPECTRUM : MOST,
+          Math.max(FEWEST, Math.round(MOST_ENTRIES / crossingsOfDomain(model, boundary))),
+          Math.max(FEWEST, Math.ceil(1 / study.grid.tolerance)),
+        )
       : setup.points;
   const main = cellSolver(setup, fine, checkpoint);
   const coarse = uncertainties ? cellSolver(setup, Math.max(4, Math.round(COARSER * fine)), checkpoint) : null;

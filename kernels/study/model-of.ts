@@ -4,6 +4,7 @@ import { compileFormula } from '../formula/compile-formula';
 import { findBreaks } from '../formula/find-breaks';
 import { findCriticalPoints } from '../formula/find-critical-points';
 import { parseFormula } from '../formula/parse-formula';
+import { type TailBranch, tailBranch } from '../grid/branch-tail';
 import type { Study } from '../spec';
 import { findSystem } from '../systems/index';
 import { StudyRefused } from './study-refused';
@@ -33,16 +34,29 @@ export function modelOf(study: Study, parameters: Readonly<Record<string, number
   const evaluate = evaluator(study, values, scope);
   const inside = (x: number) => x > from && x < to;
   const listed = (system.breaks?.[0] ?? []).filter(inside);
-  const accumulations = found.accumulations.map((at) => gapAround(at, found.at, from, to));
-  const smeared = accumulations.length > 0 ? smearGaps(evaluate, accumulations) : evaluate;
-  const breaks = merge(
-    [...found.at, ...listed, ...accumulations.flatMap((g) => [g.from, g.to]).filter(inside)],
-    to - from,
+  const gaps = found.accumulations.flatMap((at) =>
+    gapsAround(
+      at,
+      [...found.at, from, to].sort((a, b) => a - b),
+    ),
   );
+  const filled = gaps.length > 0 ? fillGaps(evaluate, gaps) : evaluate;
+  const breaks = merge([...found.at, ...listed, ...gaps.flatMap((g) => [g.point, g.near]).filter(inside)], to - from);
   const rough = found.at.filter((_, i) => found.kinds[i] === 'root' || found.kinds[i] === 'pole');
-  const flat = findCriticalPoints({ evaluate: smeared }, from, to, breaks);
-  const ends = [from, to].filter((end) => singularEnd(smeared, end, from, to));
-  return { evaluate: smeared, breaks, singular: merge([...rough, ...flat, ...ends], to - from), accumulations };
+  const flat = findCriticalPoints({ evaluate: filled }, from, to, breaks);
+  const ends = [from, to].filter((end) => singularEnd(filled, end, from, to));
+  return {
+    evaluate: filled,
+    stretch: (x, out) => {
+      const value = new Float64Array(x.length);
+      evaluate(x, value, out);
+      for (let i = 0; i < x.length; i++) out[i] = Math.log(Math.abs(out[i]));
+    },
+    breaks,
+    singular: merge([...rough, ...flat, ...ends], to - from),
+    // ln|F'| of the branches themselves is singular where they pile up
+    stretchSingular: merge([...rough, ...flat, ...ends, ...gaps.map((g) => g.point)], to - from),
+  };
 }
 
 function evaluator(
@@ -65,42 +79,60 @@ function evaluator(
 const merge = (list: number[], length: number): number[] =>
   [...list].sort((a, b) => a - b).filter((x, i, all) => i === 0 || x - all[i - 1] > 1e-13 * length);
 
-/** The stretch around an accumulation point that the listed breaks leave open. */
-function gapAround(
-  at: number,
-  breaks: readonly number[],
-  from: number,
-  to: number,
-): { at: number; from: number; to: number } {
-  const below = breaks.filter((b) => b < at);
-  const above = breaks.filter((b) => b > at);
-  return { at, from: at > from ? Math.max(from, ...below) : from, to: at < to ? Math.min(to, ...above) : to };
+interface Gap {
+  point: number;
+  near: number;
+  far: number;
 }
 
-/**
- * Replaces the map inside each gap, where infinitely many branches each cover the same range, by one branch that covers
- * it evenly: the images of the gap's mass are spread over the range, right to the order of the gap's width squared.
- */
-function smearGaps(
-  evaluate: MapModel['evaluate'],
-  gaps: readonly { at: number; from: number; to: number }[],
-): MapModel['evaluate'] {
-  const ranges = gaps.map((g) => {
-    const x = Float64Array.from({ length: 4096 }, (_, i) => g.from + ((g.to - g.from) * (i + 0.5)) / 4096);
-    const y = new Float64Array(4096);
-    evaluate(x, y);
-    const finite = y.filter(Number.isFinite);
-    return { low: Math.min(...finite), high: Math.max(...finite) };
-  });
+/** On either side of an accumulation point: the gap that the listed breaks leave, and the last branch before it. */
+function gapsAround(point: number, edges: readonly number[]): Gap[] {
+  const below = edges.filter((b) => b < point);
+  const above = edges.filter((b) => b > point);
+  const gaps: Gap[] = [];
+  if (below.length > 1) gaps.push({ point, near: below[below.length - 1], far: below[below.length - 2] });
+  if (above.length > 1) gaps.push({ point, near: above[0], far: above[1] });
+  return gaps;
+}
+
+/** Replaces the map inside each gap by one branch: the exact sum of its branches, or one that covers their range evenly. */
+function fillGaps(evaluate: MapModel['evaluate'], gaps: readonly Gap[]): MapModel['evaluate'] {
+  const one = (x: number) => {
+    const value = new Float64Array(1);
+    const slope = new Float64Array(1);
+    evaluate(Float64Array.of(x), value, slope);
+    return { value: value[0], slope: slope[0] };
+  };
+  const branches = gaps.map((g) => tailBranch(one, g.point, g.near, g.far) ?? evenBranch(evaluate, g));
   return (x, out, slope) => {
     evaluate(x, out, slope);
     for (let i = 0; i < x.length; i++) {
-      const g = gaps.findIndex((gap) => x[i] > gap.from && x[i] < gap.to);
-      if (g < 0) continue;
-      const steep = (ranges[g].high - ranges[g].low) / (gaps[g].to - gaps[g].from);
-      out[i] = ranges[g].low + steep * (x[i] - gaps[g].from);
+      for (const b of branches) {
+        if (x[i] < b.from || x[i] > b.to) continue;
+        const there = b.at(x[i]);
+        out[i] = there.value;
+        if (slope) slope[i] = there.slope;
+      }
     }
   };
+}
+
+/** One straight branch over the range of values found in a gap; right to the order of the gap's width. */
+function evenBranch(evaluate: MapModel['evaluate'], { point, near }: Gap): TailBranch {
+  const SAMPLES = 4096;
+  const from = Math.min(point, near);
+  const to = Math.max(point, near);
+  const x = Float64Array.from({ length: SAMPLES }, (_, i) => from + ((to - from) * (i + 0.5)) / SAMPLES);
+  const y = new Float64Array(SAMPLES);
+  evaluate(x, y);
+  let low = Number.POSITIVE_INFINITY;
+  let high = Number.NEGATIVE_INFINITY;
+  for (const v of y) {
+    if (v < low) low = v;
+    if (v > high) high = v;
+  }
+  const slope = (high - low) / (to - from);
+  return { from, to, at: (position) => ({ value: low + slope * (position - from), slope }) };
 }
 
 /** true where |F'| tends to zero or grows without bound towards an end of the domain. */
