@@ -15,7 +15,9 @@ function compute(
   ...args: string[]
 ): Promise<{ status: number | null; stdout: string; stderr: string; seconds: number }> {
   const since = performance.now();
-  const child = spawn(process.execPath, ['lib/ops/compute.mjs', ...args], { env: { PATH: process.env.PATH ?? '' } });
+  const child = spawn(process.execPath, ['lib/ops/compute.mjs', ...args], {
+    env: { PATH: process.env.PATH ?? '', NODE_ENV: 'production' },
+  });
   let stdout = '';
   let stderr = '';
   child.stdout.on('data', (part) => {
