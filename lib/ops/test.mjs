@@ -57,7 +57,9 @@ async function runEverything(tally, folder, undo, signal) {
   // All that the stages put into the temporary folder goes with ours.
   const scratch = `${folder}/tmp`;
   mkdirSync(scratch);
-  const run = stageRunner(signal, { TMPDIR: scratch, CHROMIUM: chromium, SMIRR_TEST_ADMIN_URL: cluster.adminUrl });
+  // Chromium would else leave its crash records in the home folder.
+  const places = { TMPDIR: scratch, XDG_CONFIG_HOME: scratch, XDG_CACHE_HOME: scratch };
+  const run = stageRunner(signal, { ...places, CHROMIUM: chromium, SMIRR_TEST_ADMIN_URL: cluster.adminUrl });
 
   await runStaticStages(tally, run);
   await runVitestStage(tally, run, scratch, ['unit', 'property', 'published']);
