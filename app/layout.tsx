@@ -37,7 +37,7 @@ export default async function RootLayout({ children }: { children: ReactNode }) 
           Skip to the content
         </a>
         <SiteHeader />
-        <main id="main" className="mx-auto w-full max-w-[1400px] grow px-4 sm:px-7">
+        <main id="main" className="mx-auto min-h-dvh w-full max-w-[1400px] grow px-4 sm:px-7">
           {children}
         </main>
         <SiteFooter />

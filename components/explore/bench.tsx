@@ -1,14 +1,14 @@
 'use client';
 
+import type { ReactNode } from 'react';
 import type { ExploreBeginning } from '@/lib/client/explore-store';
 import type { SystemEntry } from '@/lib/shared/system-entry';
 import { Address } from './address';
 import { DensityPanel } from './density-panel';
 import { EquationForm } from './equation-form';
-import { ExploreProvider } from './explore-context';
+import { ExploreProvider, useExplore } from './explore-context';
 import { KeyNumbers } from './key-numbers';
 import { NoisePanel } from './noise-panel';
-import { ProgressLine } from './progress-line';
 import { Settings } from './settings';
 import { SpectrumPanel } from './spectrum-panel';
 import { StudyBar } from './study-bar';
@@ -24,7 +24,7 @@ interface BenchProps {
 export function Bench({ beginning, catalogue, addressFault }: BenchProps) {
   return (
     <ExploreProvider beginning={beginning} catalogue={catalogue}>
-      <div className="pt-4">
+      <BenchState>
         {addressFault && (
           <p role="alert" className="mb-3 border-l-2 border-ink pl-3">
             The address does not hold a study that can be read ({addressFault}). This is the bench’s first study
@@ -33,10 +33,7 @@ export function Bench({ beginning, catalogue, addressFault }: BenchProps) {
         )}
         <StudyBar />
         <EquationForm />
-        <div className="flex flex-wrap items-start justify-between gap-x-6">
-          <Settings />
-          <ProgressLine />
-        </div>
+        <Settings />
         <StudyFaults />
         <Address />
         <div className="mt-4 grid gap-x-8 gap-y-8 lg:grid-cols-[minmax(0,1.85fr)_minmax(0,1fr)]">
@@ -51,7 +48,19 @@ export function Bench({ beginning, catalogue, addressFault }: BenchProps) {
         <div className="mt-6 max-sm:contents">
           <NoisePanel />
         </div>
-      </div>
+      </BenchState>
     </ExploreProvider>
+  );
+}
+
+/** Says to assistive technology whether the figures belong to the study as it stands. */
+function BenchState({ children }: { children: ReactNode }) {
+  const settled = useExplore(
+    (state) => !state.computing && state.faults.length === 0 && state.picture?.settled === true,
+  );
+  return (
+    <div className="pt-4" data-bench={settled ? 'settled' : 'moving'} aria-busy={!settled}>
+      {children}
+    </div>
   );
 }

@@ -25,7 +25,10 @@ export function EquationForm() {
   const domainFault = useExplore((state) => faultAt(state, 'domain')?.message);
   const step = linearStepper(anywhere, to - from);
   return (
-    <div className="math mt-2 flex flex-wrap items-baseline gap-x-10 gap-y-2 text-[1.625rem] leading-[1.7]">
+    <div
+      data-equation
+      className="math mt-2 flex flex-wrap items-baseline gap-x-10 gap-y-2 text-[1.625rem] leading-[1.7]"
+    >
       <span>
         <i>{variable}</i>′ = <TypesetEquation />
         {sigma !== null && (

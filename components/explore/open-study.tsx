@@ -30,7 +30,7 @@ export function OpenStudy() {
   };
   return (
     <>
-      <Button onClick={() => input.current?.click()}>Open file…</Button>
+      <Button onClick={() => input.current?.click()}>Open…</Button>
       <input
         ref={input}
         type="file"

@@ -23,17 +23,17 @@ export function ProgressLine() {
   const share = progress && progress.total > 0 ? progress.done / progress.total : null;
   const left = share !== null && progress && share > 0.05 ? (progress.seconds / share) * (1 - share) : null;
   return (
-    <div className="mt-2 flex h-8 items-center gap-3 text-muted" role="status">
+    <div className="ml-auto flex h-8 w-60 items-center leading-tight sm:w-80 gap-3 text-muted" role="status">
       {long && computing ? (
         <>
+          <Button onClick={stop} className="h-7 py-0">
+            Stop
+          </Button>
           <span>
             Computing
             {share !== null && `, ${Math.round(share * 100)} %`}
             {left !== null && left >= 1 && `, ${Math.ceil(left)} s left`}
           </span>
-          <Button onClick={stop} className="h-8">
-            Stop
-          </Button>
         </>
       ) : failure ? (
         <span className="text-ink">The computation failed: {failure}</span>

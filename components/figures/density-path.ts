@@ -1,4 +1,4 @@
-import { area, curveMonotoneX, curveStep, line } from 'd3-shape';
+import { area, curveLinear, curveMonotoneX, curveStep, line } from 'd3-shape';
 
 export interface Curve {
   x: number[];
@@ -7,13 +7,19 @@ export interface Curve {
 
 const round = (value: number) => Math.round(value * 10) / 10;
 
+/** Points closer than a few pixels need no rounding between them, and a third of the text. */
+function curveFor(places: number[], x: (value: number) => number) {
+  const width = places.length > 1 ? x(places[places.length - 1]) - x(places[0]) : 0;
+  return width / places.length > 3 ? curveMonotoneX : curveLinear;
+}
+
 /** A smooth density through its grid points. */
 export function curvePath(curve: Curve, x: (value: number) => number, y: (value: number) => number): string {
   return (
     line<number>()
       .x((_, i) => round(x(curve.x[i])))
       .y((_, i) => round(y(curve.values[i])))
-      .curve(curveMonotoneX)(curve.values) ?? ''
+      .curve(curveFor(curve.x, x))(curve.values) ?? ''
   );
 }
 
@@ -23,7 +29,7 @@ export function areaPath(curve: Curve, x: (value: number) => number, y: (value: 
       .x((_, i) => round(x(curve.x[i])))
       .y0(round(y(0)))
       .y1((_, i) => round(y(curve.values[i])))
-      .curve(curveMonotoneX)(curve.values) ?? ''
+      .curve(curveFor(curve.x, x))(curve.values) ?? ''
   );
 }
 

@@ -41,7 +41,8 @@ export function firstState(study: StudyFile): ExploreState {
     study,
     faults: [],
     picture: null,
-    computing: false,
+    // The first pass starts with the page.
+    computing: true,
     progress: null,
     failure: null,
     past: [],

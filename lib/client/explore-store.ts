@@ -79,6 +79,7 @@ export function createExploreStore(from: ExploreBeginning, host: KernelHost, tim
       stop() {
         cancelRest();
         kernel.stop();
+        set({ computing: false, progress: null });
       },
       start: () => (get().picture ? compute('full') : computeAndRest()),
       keepTypeset: (text, formula) => set({ typesets: { ...get().typesets, [text]: formula } }),
