@@ -111,6 +111,24 @@ export const BLOCK_KERNELS = {
     const d = s[1];
     for (let i = 0; i < n; i++) out[o + i] = c * a[p + i] + d * b[q + i];
   },
+  /** (s0*a + s1) * (s2*b + s3): a product of two factors of first degree in one pass */
+  mulAffine: (n, out, o, v, at, s) => {
+    const a = v[0];
+    const b = v[1];
+    const p = at[0];
+    const q = at[1];
+    const [e, f, g, h] = s;
+    for (let i = 0; i < n; i++) out[o + i] = (e * a[p + i] + f) * (g * b[q + i] + h);
+  },
+  /** s4*(s0*a + s1) + s5*(s2*b + s3): its derivative */
+  blendAffine: (n, out, o, v, at, s) => {
+    const a = v[0];
+    const b = v[1];
+    const p = at[0];
+    const q = at[1];
+    const [e, f, g, h, c, d] = s;
+    for (let i = 0; i < n; i++) out[o + i] = c * (e * a[p + i] + f) + d * (g * b[q + i] + h);
+  },
   squareV: (n, out, o, v, at) => {
     const a = v[0];
     const p = at[0];

@@ -3,6 +3,7 @@ import type { Operand, Program } from './assembler';
 import { BLOCK_KERNELS, type BlockKernel } from './block-kernels';
 import type { FormulaScope } from './formula-scope';
 import type { FormulaTree } from './formula-tree';
+import { fuseSteps } from './fuse-steps';
 
 /** Points per block: a formula's arrays stay in the processor's first cache. */
 const BLOCK = 512;
@@ -106,7 +107,8 @@ interface LinkedStep {
 }
 
 /** Gives every intermediate result a working array (reused once it is no longer read) and the results their outputs. */
-function link(program: Program, results: readonly Operand[]): Runner {
+function link(assembled: Program, results: readonly Operand[]): Runner {
+  const program = fuseSteps(assembled, results);
   const { inputs } = program;
   const steps = program.steps.map((step) => ({ ...step }));
   const places = new Map<number, number>();
