@@ -1,3 +1,5 @@
+import { type Checkpoint, neverStop } from '../core/checkpoint';
+
 /**
  * Solves F(x) = target for many brackets at once, F monotone inside each.
  *
@@ -17,6 +19,7 @@ export function solveMonotone(
   high: Float64Array,
   atLow: Float64Array,
   target: Float64Array,
+  checkpoint: Checkpoint = neverStop,
 ): Float64Array {
   const solution = new Float64Array(low.length);
   let active = Int32Array.from(low, (_, i) => i);
@@ -51,6 +54,7 @@ export function solveMonotone(
       active[left++] = i;
     }
     active = active.subarray(0, left);
+    checkpoint(low.length - left, low.length);
   }
   for (const i of active) solution[i] = x[i];
   return solution;

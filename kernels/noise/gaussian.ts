@@ -11,5 +11,6 @@ export const gaussian: NoiseKind = {
   tail: (d, sigma) => 0.5 * erfc(d / (sigma * Math.SQRT2)),
   transform: (q, sigma) => Math.exp(-0.5 * q * q * sigma * sigma),
   reach: 8.9, // exp(−39.6) = 6e-18
+  reachOf: (part) => Math.sqrt(-2 * Math.log(part)),
   fullReach: 38.5, // exp(−741) = 1e-322
 };

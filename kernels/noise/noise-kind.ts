@@ -10,6 +10,8 @@ export interface NoiseKind {
   transform(q: number, sigma: number): number;
   /** multiples of sigma beyond which the density is below 1e-17 of its peak: round-off of a sum of order one */
   readonly reach: number;
+  /** multiples of sigma beyond which the density is below `part` of its peak, 0 < part < 1 */
+  reachOf(part: number): number;
   /** multiples of sigma beyond which the density underflows: what direct sums keep for rare events */
   readonly fullReach: number;
 }

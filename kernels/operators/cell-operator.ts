@@ -1,3 +1,4 @@
+import { type Checkpoint, neverStop } from '../core/checkpoint';
 import type { MapModel } from '../core/map-model';
 import { solveMonotone } from '../grid/solve-monotone';
 import type { Boundary } from './ends';
@@ -29,7 +30,7 @@ export class CellOperator implements OperatorPair {
    * @param cells number of cells, 2 up
    * @throws RangeError where an image crosses more than 64 times the domain in one cell (a slope without bound)
    */
-  constructor(model: MapModel, boundary: Boundary, cells: number) {
+  constructor(model: MapModel, boundary: Boundary, cells: number, checkpoint: Checkpoint = neverStop) {
     const { from, to } = boundary;
     const h = (to - from) / cells;
     this.size = cells;
@@ -44,6 +45,7 @@ export class CellOperator implements OperatorPair {
       crossings.high,
       crossings.atLow,
       crossings.target,
+      checkpoint,
     );
     this.column = new Int32Array(cells + 1);
     const row: number[] = [];
@@ -84,6 +86,7 @@ export class CellOperator implements OperatorPair {
       put(part.cell, part.count === 0 ? part.only : rising ? k - 1 : k, Math.max(0, part.high - left));
     }
     while (open < cells) close(open++);
+    checkpoint(cells, cells);
     this.row = Int32Array.from(row);
     this.share = Float64Array.from(share);
   }

@@ -176,7 +176,7 @@ function stationary(
     uncertainty = 2 * largestDifference(rho, there) + 64 * EPS * top;
   }
   const second = finer
-    ? denseWay(setup.model, setup.boundary, setup.noise, setup.sigma, Math.round(1.3 * rho.length), 2)
+    ? denseWay(setup.model, setup.boundary, setup.noise, setup.sigma, Math.round(1.3 * rho.length), 2, setup.checkpoint)
     : null;
   const span = setup.boundary.to - setup.boundary.from;
   return {

@@ -1,6 +1,6 @@
 import seedrandom from 'seedrandom';
 import { type Checkpoint, neverStop } from '../core/checkpoint';
-import { type ExitSolution, solveExit } from '../exits/exit-solution';
+import { type ExitSolution, rateBySweeps, solveExit } from '../exits/exit-solution';
 import { prepareSpread, type Spread } from '../fft/spread-kernel';
 import type { StartSources } from '../grid/start-sources';
 import { exitProbability, foldImage, loses } from '../operators/ends';
@@ -91,7 +91,7 @@ export class NoisySolver {
       const { pairs } = this.spectrum(2);
       const modulus = (k: number) => (pairs[k] ? Math.hypot(pairs[k].re, pairs[k].im) : 0);
       this.solved = solveExit(
-        this.plan.directOperator(this.sigma),
+        this.positiveOperator(),
         this.leaveProbability(),
         this.stationary(),
         Math.min(1, modulus(1) / modulus(0)),
@@ -99,6 +99,23 @@ export class NoisySolver {
       );
     }
     return this.solved;
+  }
+
+  /** Probability of leaving per step to a relative tolerance, without the field of times: what a noise rail needs. */
+  leavingPerStep(tolerance: number): number {
+    return rateBySweeps(this.positiveOperator(), this.leaveProbability(), this.stationary(), tolerance, this.checkpoint)
+      .perStep;
+  }
+
+  /**
+   * The direct operator with a band wide enough for its exits: an entry below 1e-16 of the rate adds nothing to it.
+   * Where the eigenvalue cannot tell the rate from zero the band is as wide as the noise's density reaches.
+   */
+  private positiveOperator() {
+    const rate = 1 - this.kept();
+    const { noise } = this.plan;
+    const multiples = rate > 1e-10 ? Math.min(noise.fullReach, noise.reachOf(1e-16 * rate)) : noise.fullReach;
+    return this.plan.directOperator(this.sigma, multiples);
   }
 
   /** Density one step after point masses, on the nodes or at other prepared positions. */

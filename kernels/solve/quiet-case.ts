@@ -112,7 +112,10 @@ export function quietCase(
 
 /** The solver on so many cells; the cell matrix is kept in the case's cache. */
 export function cellSolver(setup: CaseSetup, cells: number, checkpoint: Checkpoint): CellSolver {
-  const operator = setup.cache(`cells ${cells}`, () => new CellOperator(setup.model, setup.boundary, cells));
+  const operator = setup.cache(
+    `cells ${cells}`,
+    () => new CellOperator(setup.model, setup.boundary, cells, checkpoint),
+  );
   return new CellSolver(operator, setup.model, setup.boundary, checkpoint);
 }
 

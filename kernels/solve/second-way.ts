@@ -1,3 +1,4 @@
+import { type Checkpoint, neverStop } from '../core/checkpoint';
 import type { MapModel } from '../core/map-model';
 import { panelGrid } from '../grid/panels';
 import type { NoiseKind } from '../noise/noise-kind';
@@ -34,6 +35,7 @@ export function denseWay(
   sigma: number,
   points: number,
   count: number,
+  checkpoint: Checkpoint = neverStop,
 ): DenseWay | null {
   if (points > SECOND_WAY_POINTS) return null;
   const { from, to } = boundary;
@@ -55,6 +57,7 @@ export function denseWay(
     count,
     tolerance: 2e-14,
     start: seededStart(grid.x.length),
+    checkpoint,
   });
   const { vector, re } = found.pairs[0];
   const total = vector.reduce((s, v, i) => s + v * grid.weights[i], 0);

@@ -1,0 +1,34 @@
+import type { NoisySolver } from './noisy-solver';
+
+/** What is drawn along the noise axis at one noise level; null where it does not exist. */
+export interface RailPoint {
+  readonly sigma: number;
+  /** mean exit time from the quasi-stationary density, steps; null where nothing leaves */
+  readonly meanTime: number | null;
+  /** relaxation time, steps; null without a second eigenvalue */
+  readonly relaxationTime: number | null;
+  /** Lyapunov exponent, per step, natural logarithm */
+  readonly lyapunov: number | null;
+}
+
+/** Relative accuracy of the exit time on the rail: far below what a plot shows. */
+const RAIL_TOLERANCE = 1e-9;
+
+/**
+ * Mean exit time, relaxation time and Lyapunov exponent at one noise level, without error bars.
+ *
+ * @param solver at that noise level, on a grid of any tolerance
+ * @returns numbers to about 1e-8 relative; exit times at any rarity
+ */
+export function railPoint(solver: NoisySolver): RailPoint {
+  const { pairs } = solver.spectrum(2);
+  const ratio = pairs[1] ? Math.hypot(pairs[1].re, pairs[1].im) / Math.hypot(pairs[0].re, pairs[0].im) : 0;
+  const leaving = solver.loses ? solver.leavingPerStep(RAIL_TOLERANCE) : 0;
+  const exponent = solver.meanStretch(solver.stationary(), solver.kept());
+  return {
+    sigma: solver.sigma,
+    meanTime: leaving > 0 ? 1 / leaving : null,
+    relaxationTime: ratio > 1e-12 ? -1 / Math.log(ratio) : null,
+    lyapunov: Number.isFinite(exponent) ? exponent : null,
+  };
+}
