@@ -31,7 +31,7 @@ export function KeyNumber({ id, label, unit, quantity, absent, settled }: KeyNum
             </span>
           </>
         ) : (
-          <span className="block min-h-14 py-1 text-muted">{absent}</span>
+          <span className="block min-h-14 max-w-56 py-1 text-[0.8125rem] text-muted">{absent}</span>
         )}
       </dd>
     </div>

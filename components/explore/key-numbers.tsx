@@ -10,7 +10,10 @@ export function KeyNumbers() {
   const picture = useExplore((state) => state.picture);
   const absorbing = useExplore((state) => state.study.domain.some(({ ends }) => losesMass(ends)));
   const settled = picture?.settled ?? false;
-  const wait = picture === null ? '…' : 'not known here';
+  const why = (...codes: string[]) => {
+    if (picture === null) return '…';
+    return picture.warnings.find(({ code }) => codes.includes(code))?.message ?? 'not known here';
+  };
   const { exit, spectrum, lyapunov } = picture?.case ?? {};
   return (
     <section aria-label="Key numbers">
@@ -20,7 +23,7 @@ export function KeyNumbers() {
           label="Mean exit time"
           unit="steps"
           quantity={exit?.meanTime}
-          absent={absorbing ? wait : 'nothing leaves: no end absorbs'}
+          absent={absorbing ? why('exit-not-computed', 'exit-not-settled') : 'nothing leaves: no end absorbs'}
           settled={settled}
         />
         <KeyNumber
@@ -28,7 +31,7 @@ export function KeyNumbers() {
           label="Relaxation time"
           unit="steps"
           quantity={spectrum?.relaxationTime}
-          absent={wait}
+          absent={why('no-second-eigenvalue')}
           settled={settled}
         />
         <KeyNumber
@@ -36,7 +39,7 @@ export function KeyNumbers() {
           label="Lyapunov exponent"
           unit="per step"
           quantity={lyapunov?.value}
-          absent={wait}
+          absent={why('no-exponent')}
           settled={settled}
         />
         {lyapunov?.survivors && (
@@ -45,12 +48,23 @@ export function KeyNumbers() {
             label="Exponent of the survivors"
             unit="per step"
             quantity={lyapunov.survivors}
-            absent={wait}
+            absent={why('no-exponent')}
             settled={settled}
           />
         )}
       </dl>
       {absorbing && <p className="mt-2 max-w-3xl text-[0.8125rem] text-muted">{EXIT_CAUTION}</p>}
+      <Warnings />
     </section>
   );
+}
+
+/** What the computation could not give, or gives with a reservation, in its own words. */
+function Warnings() {
+  const warnings = useExplore((state) => state.picture?.warnings);
+  return warnings?.map(({ code, message }) => (
+    <p key={`${code} ${message}`} className="mt-2 max-w-3xl border-l-2 border-ink pl-3 text-[0.8125rem]">
+      {message}
+    </p>
+  ));
 }

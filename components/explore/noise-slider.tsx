@@ -5,6 +5,7 @@ import { type KeyboardEvent, type PointerEvent, useRef } from 'react';
 import { useWidth } from '@/components/figures/use-width';
 import { noiseLevel } from '@/lib/shared/bench-study';
 import { formatEntry, formatTick } from '@/lib/shared/format-number';
+import { plainDecimal } from '@/lib/shared/plain-decimal';
 import { COARSE, clamp, digitStepper, threeDigits } from '@/lib/shared/step-number';
 import { useExplore } from './explore-context';
 import { sigmaBounds, withSigma } from './study-edits';
@@ -70,9 +71,9 @@ export function NoiseSlider() {
         role="slider"
         tabIndex={0}
         aria-label="Noise level sigma"
-        aria-valuemin={bounds.min}
-        aria-valuemax={bounds.max}
-        aria-valuenow={sigma}
+        aria-valuemin={plainDecimal(bounds.min) as number}
+        aria-valuemax={plainDecimal(bounds.max) as number}
+        aria-valuenow={plainDecimal(sigma) as number}
         aria-valuetext={`${formatEntry(sigma)}${unit ? ` ${unit}` : ''}`}
         className="group absolute inset-0 cursor-ew-resize touch-none outline-none"
         onPointerDown={(event) => {

@@ -1,6 +1,6 @@
 'use client';
 
-import { formatCount } from '@/lib/shared/format-number';
+import { formatCount, formatDigits } from '@/lib/shared/format-number';
 import { useExplore } from './explore-context';
 
 /** What says how far the spectrum can be trusted. */
@@ -16,7 +16,7 @@ export function SpectrumLedger() {
   if (spectrum.trace && picture.settled) {
     const { integral, sum, rest } = spectrum.trace;
     const agrees = Math.abs(integral - sum) <= rest + 1e-9;
-    parts.push(agrees ? 'trace agrees' : `trace differs by ${Math.abs(integral - sum).toExponential(0)}`);
+    parts.push(agrees ? 'trace agrees' : `trace differs by ${formatDigits(Math.abs(integral - sum), { digits: 2 })}`);
   }
   if (unresolved > 0) parts.push(`${unresolved} unresolved, drawn faint`);
   return (

@@ -8,6 +8,7 @@ import { SpectrumFigure, spectrumScale } from '@/components/figures/spectrum-fig
 import { useWidth } from '@/components/figures/use-width';
 import { eigenvalueRows } from '@/lib/shared/eigenvalue-rows';
 import type { Eigenvalue } from '@/lib/shared/study-types';
+import { complexText } from './complex-text';
 import { useExplore } from './explore-context';
 import { resultNotes } from './result-notes';
 import { SpectrumLedger } from './spectrum-ledger';
@@ -72,15 +73,19 @@ export function SpectrumPanel() {
             label="Readout among the eigenvalues"
             now={chosen ?? 0}
             steps={Math.max(noisy.length - 1, 0)}
-            text={
-              marked
-                ? `${(chosen ?? 0) + 1} of ${noisy.length}: real part ${marked.re.toPrecision(6)}, imaginary part ${marked.im.toPrecision(6)}`
-                : 'none chosen'
-            }
+            text={marked ? `${(chosen ?? 0) + 1} of ${noisy.length}: ${complexText(marked)}` : 'none chosen'}
             onPoint={nearest}
             onStep={setChosen}
             onLeave={() => setChosen(null)}
           />
+          {marked && (
+            <p
+              aria-hidden="true"
+              className="figures pointer-events-none absolute bottom-0 left-0 bg-paper px-1 text-[0.8125rem]"
+            >
+              {complexText(marked)}
+            </p>
+          )}
         </div>
       </div>
       <div className="mt-2 min-h-60">

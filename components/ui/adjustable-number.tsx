@@ -3,6 +3,7 @@
 import { type KeyboardEvent, type PointerEvent, useId, useRef, useState } from 'react';
 import { formatEntry } from '@/lib/shared/format-number';
 import { parseNumber } from '@/lib/shared/parse-number';
+import { plainDecimal } from '@/lib/shared/plain-decimal';
 import { type Bounds, COARSE, type Stepper } from '@/lib/shared/step-number';
 
 interface AdjustableNumberProps {
@@ -99,9 +100,10 @@ export function AdjustableNumber({
         autoComplete="off"
         spellCheck={false}
         aria-label={label}
-        aria-valuenow={value}
-        aria-valuemin={bounds.min}
-        aria-valuemax={bounds.max}
+        aria-valuenow={plainDecimal(value) as number}
+        aria-valuemin={plainDecimal(bounds.min) as number}
+        aria-valuemax={plainDecimal(bounds.max) as number}
+        aria-valuetext={text}
         aria-invalid={wrong !== undefined}
         aria-describedby={wrong === undefined ? undefined : faultId}
         value={text}

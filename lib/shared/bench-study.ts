@@ -30,8 +30,11 @@ export function losesMass(ends: Ends): boolean {
 export function benchRequest(study: StudyFile, pass: 'live' | 'full'): StudyFile {
   const { sweep: _sweep, ask: _ask, ...kept } = study;
   const deterministic = pass === 'full';
+  // Without noise everything comes from cells, of which a fine picture takes very many.
+  const coarse = pass === 'live' && study.noise.kind === 'none' && { grid: { ...study.grid, points: 1024 } };
   return {
     ...kept,
+    ...coarse,
     ask: {
       stationary: { deterministic },
       spectrum: { count: 8, deterministic },
