@@ -10,6 +10,8 @@ export interface MapModel {
   readonly breaks: readonly number[];
   /** positions in the domain, ends included, where F' is zero or unbounded: ln|F'| is singular there; increasing */
   readonly singular: readonly number[];
+  /** false: more breaks than could be listed; numbers are less certain than they look */
+  readonly complete: boolean;
   /** out ← ln|F'(x)|: where a branch stands in for infinitely many, that of the map itself */
   stretch(x: Float64Array, out: Float64Array): void;
   /** positions where ln|F'| is singular, those where branches pile up included; increasing */

@@ -10,8 +10,9 @@ export interface ExitSolution {
   readonly perStep: number;
   /** mean number of steps to the exit from each node, the exiting step counted */
   readonly field: Float64Array;
-  /** false: the sweeps ran out before the last digits stood */
+  /** false: density and rate did not settle; the field stands nevertheless where it came from elimination */
   readonly converged: boolean;
+  readonly fieldConverged: boolean;
 }
 
 /** An operator whose entries are at hand as positive numbers. */
@@ -51,7 +52,9 @@ export function solveExit(
   const n = operator.size;
   const slow = second > 0.98;
   if (n <= ALWAYS || (slow && n <= AT_MOST)) return byElimination(operator, leave, density, checkpoint);
-  return bySweeps(operator, leave, density, checkpoint);
+  const swept = bySweeps(operator, leave, density, checkpoint);
+  if ((swept.converged && swept.fieldConverged) || n > AT_MOST) return swept;
+  return byElimination(operator, leave, density, checkpoint);
 }
 
 /** Exits by elimination, n³/3 multiplications; see `Elimination`. */
@@ -85,7 +88,7 @@ export function byElimination(
     mass = next;
     perStep = out;
   }
-  return { density: mass.map((m, i) => m / weights[i]), perStep, field, converged };
+  return { density: mass.map((m, i) => m / weights[i]), perStep, field, converged, fieldConverged: true };
 }
 
 /** Sweeps at most; a second mode of 0.98 has died to round-off by then. */
@@ -139,7 +142,6 @@ export function bySweeps(
   const { size: n, weights } = operator;
   const rate = rateBySweeps(operator, leave, density, 1e-14, checkpoint);
   const { density: rho, perStep } = rate;
-  let { converged } = rate;
   // the invariant observable by the same sweeps of the adjoint, scaled to ⟨h, ρ⟩ = 1
   let h: Float64Array = new Float64Array(n).fill(1);
   let fresh: Float64Array = new Float64Array(n);
@@ -155,7 +157,6 @@ export function bySweeps(
     [h, fresh] = [fresh, h];
     checkpoint(pass, MOST_SWEEPS);
   }
-  converged &&= gap <= 1e-13;
   // what 1 has beside h dies like the second mode
   let term: Float64Array = h.map((v) => 1 - v);
   const field = h.map((v) => v / perStep);
@@ -172,8 +173,8 @@ export function bySweeps(
     [term, fresh] = [fresh, term];
     checkpoint(pass, MOST_SWEEPS);
   }
-  converged &&= largest <= 1e-13;
-  return { density: rho, perStep, field, converged };
+  const fieldConverged = rate.converged && gap <= 1e-13 && largest <= 1e-13;
+  return { density: rho, perStep, field, converged: rate.converged, fieldConverged };
 }
 
 /** Positive part of an eigenfunction, whatever sign it came with, as a density of integral 1. */

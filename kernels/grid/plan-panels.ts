@@ -51,7 +51,14 @@ function steepAt(model: MapModel, c: number, from: number, to: number): boolean 
 }
 
 /** Panels wanted per unit length for noise of one sigma. */
-function needOf(model: MapModel, boundary: Boundary, sigma: number, width: number, reach: number): Need {
+function needOf(
+  model: MapModel,
+  boundary: Boundary,
+  sigma: number,
+  width: number,
+  reach: number,
+  steepest = Number.POSITIVE_INFINITY,
+): Need {
   const { from, to } = boundary;
   const least = LEAST_PANELS / (to - from);
   return sampleNeed(pieces(model, boundary), (x, out) => {
@@ -61,10 +68,51 @@ function needOf(model: MapModel, boundary: Boundary, sigma: number, width: numbe
     for (let i = 0; i < x.length; i++) {
       // what is carried far beyond an absorbing end is lost whatever its slope
       const away = loses(boundary) ? Math.max(from - value[i], value[i] - to, 0) : 0;
-      const stretch = Number.isFinite(slope[i]) && away <= 2 * reach ? slope[i] : 0;
+      const stretch = Number.isFinite(slope[i]) && away <= 2 * reach ? Math.min(Math.abs(slope[i]), steepest) : 0;
       out[i] = Math.max(least, Math.sqrt(1 + stretch * stretch) / (width * sigma));
     }
   });
+}
+
+/** The grid that a noise level needs is beyond what is affordable. */
+export class TooManyPoints extends RangeError {
+  readonly points: number;
+  /** noise level from which the grid is affordable, about */
+  readonly allowed: number;
+
+  constructor(sigma: number, points: number) {
+    const allowed = (sigma * points) / MOST_POINTS;
+    super(
+      `sigma ${sigma}: needs ${points} points; allowed are at most ${MOST_POINTS}, enough for sigma from ${allowed} up`,
+    );
+    this.name = 'TooManyPoints';
+    this.points = points;
+    this.allowed = allowed;
+  }
+}
+
+const slopeUnbounded = (model: MapModel, { from, to }: Boundary) =>
+  model.singular.some((c) => steepAt(model, c, from, to));
+
+/**
+ * The grid where a slope grows without bound and the ends fold every image back: panels follow slopes up to the steepest
+ * that is affordable, and what little mass lies beyond is carried to images that are right only in number.
+ */
+function blurred(
+  model: MapModel,
+  boundary: Boundary,
+  sigma: number,
+  width: number,
+  reach: number,
+  factor: number,
+  enough: number,
+): PanelPlan {
+  for (let steepest = 1e8; steepest >= 10; steepest /= 2) {
+    const need = needOf(model, boundary, sigma, width, reach, steepest);
+    if (PANEL_ORDER * countByNeed(need, factor) > MOST_POINTS / 4) continue;
+    return { grid: panelGrid(cutByNeed(need, factor), PANEL_ORDER), resolved: false, enough };
+  }
+  throw new TooManyPoints(sigma, enough);
 }
 
 export interface PanelPlan {
@@ -84,7 +132,7 @@ export interface PanelPlan {
  * @param factor multiplies the number of panels or points; 1.2 makes the finer grid that uncertainties come from
  * @param reach absolute distance beyond which the noise counts as zero
  * @returns grid; for a number of points exactly that many (times factor, rounded) unless the edges alone need more
- * @throws RangeError where "auto" would need more than MOST_POINTS points
+ * @throws TooManyPoints where "auto" would need more than MOST_POINTS points
  */
 export function planPanels(
   model: MapModel,
@@ -95,14 +143,13 @@ export function planPanels(
   reach: number,
 ): PanelPlan {
   const auto = 'tolerance' in request;
-  const need = needOf(model, boundary, sigma, panelWidth(auto ? request.tolerance : 1e-8), reach);
+  const width = panelWidth(auto ? request.tolerance : 1e-8);
+  const need = needOf(model, boundary, sigma, width, reach);
   const enough = PANEL_ORDER * countByNeed(need, 1);
   if (auto) {
     if (enough > MOST_POINTS) {
-      const allowed = (sigma * enough) / MOST_POINTS;
-      throw new RangeError(
-        `noise.sigma: ${sigma} needs ${enough} points; allowed are ${MOST_POINTS}, enough from about ${Number(allowed.toPrecision(2))} up, or the kind "none"`,
-      );
+      if (slopeUnbounded(model, boundary)) return blurred(model, boundary, sigma, width, reach, factor, enough);
+      throw new TooManyPoints(sigma, enough);
     }
     return { grid: panelGrid(cutByNeed(need, factor), PANEL_ORDER), resolved: true, enough };
   }

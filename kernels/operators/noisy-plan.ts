@@ -99,8 +99,7 @@ export class NoisyPlan {
       const fine = stretchGrid(this.grid, this.model.stretchSingular);
       const logs = new Float64Array(fine.x.length);
       this.model.stretch(fine.x, logs);
-      // a slope that rounds to exactly zero lies within 1e-16 of the singular point and weighs as little
-      const weights = fine.weights.map((w, i) => (logs[i] === Number.NEGATIVE_INFINITY ? 0 : w * logs[i]));
+      const weights = fine.weights.map((w, i) => stretchWeight(w, logs[i], fine.x[i], this.model, this.boundary));
       this.stretching = { x: fine.x, targets: this.targetsAt(fine.x), weights };
     }
     return this.stretching;
@@ -123,9 +122,23 @@ function extentOf(model: MapModel, boundary: Boundary, { panels }: PanelGrid): [
   return [low, high];
 }
 
+/**
+ * Weight of a node in the quadrature of ln|F'|. A slope that rounds to zero beside a critical point weighs nothing; one
+ * that is zero elsewhere belongs to a flat stretch, where the mean is −∞.
+ */
+export function stretchWeight(weight: number, log: number, x: number, model: MapModel, { from, to }: Boundary): number {
+  if (log !== Number.NEGATIVE_INFINITY) return weight * log;
+  return model.stretchSingular.some((c) => Math.abs(c - x) <= 1e-9 * (to - from)) ? 0 : Number.NEGATIVE_INFINITY;
+}
+
+/** Number of the half octave of noise levels that holds sigma: noise levels with the same number share a plan. */
+export function levelIndex(sigma: number): number {
+  return Math.floor(2 * Math.log2(sigma) + 1e-12);
+}
+
 /** The half octave of noise levels that holds sigma, as [smallest, largest]. */
 export function levelOf(sigma: number): [number, number] {
-  const level = Math.floor(Math.log(sigma) / Math.log(LEVEL) + 1e-12);
+  const level = levelIndex(sigma);
   return [Math.min(sigma, LEVEL ** level), Math.max(sigma, LEVEL ** (level + 1))];
 }
 

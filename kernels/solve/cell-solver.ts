@@ -5,7 +5,7 @@ import { panelGrid } from '../grid/panels';
 import type { StartSources } from '../grid/start-sources';
 import type { CellOperator } from '../operators/cell-operator';
 import { type Boundary, loses } from '../operators/ends';
-import { stretchGrid } from '../operators/noisy-plan';
+import { stretchGrid, stretchWeight } from '../operators/noisy-plan';
 import { type ArnoldiResult, arnoldi } from '../spectrum/arnoldi';
 import { seededStart } from './noisy-solver';
 
@@ -90,7 +90,7 @@ export class CellSolver {
   meanStretch(f: Float64Array): number {
     this.stretches ??= cellStretches(this.model, this.boundary, this.operator.size);
     let sum = 0;
-    for (let i = 0; i < f.length; i++) sum += this.stretches[i] * f[i];
+    for (let i = 0; i < f.length; i++) if (f[i] !== 0) sum += this.stretches[i] * f[i];
     return sum;
   }
 
@@ -102,7 +102,8 @@ export class CellSolver {
 }
 
 /** ∫ ln|F'| dx over each cell. */
-function cellStretches(model: MapModel, { from, to }: Boundary, cells: number): Float64Array {
+function cellStretches(model: MapModel, boundary: Boundary, cells: number): Float64Array {
+  const { from, to } = boundary;
   const h = (to - from) / cells;
   const edges = [
     ...Array.from({ length: cells }, (_, i) => from + i * h),
@@ -117,7 +118,7 @@ function cellStretches(model: MapModel, { from, to }: Boundary, cells: number): 
   const out = new Float64Array(cells);
   for (let i = 0; i < grid.x.length; i++) {
     const cell = Math.min(cells - 1, Math.max(0, Math.floor((grid.x[i] - from) / h)));
-    if (logs[i] !== Number.NEGATIVE_INFINITY) out[cell] += grid.weights[i] * logs[i];
+    out[cell] += stretchWeight(grid.weights[i], logs[i], grid.x[i], model, boundary);
   }
   return out;
 }

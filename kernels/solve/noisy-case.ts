@@ -1,10 +1,12 @@
 import type { Checkpoint } from '../core/checkpoint';
+import { MOST_POINTS, TooManyPoints } from '../grid/plan-panels';
 import type { StartSources } from '../grid/start-sources';
-import { NoisyPlan } from '../operators/noisy-plan';
+import { levelIndex, levelOf, NoisyPlan } from '../operators/noisy-plan';
 import type { Quantity, ResultCase, Warning } from '../result';
 import type { Study } from '../spec';
 import type { EigenPair } from '../spectrum/arnoldi';
 import { startOf } from '../study/start-of';
+import { StudyRefused } from '../study/study-refused';
 import type { CaseSetup } from './case-setup';
 import { NoisySolver } from './noisy-solver';
 import { bound, errorBar } from './quantity';
@@ -33,9 +35,8 @@ export function noisyCase(
   const { model, boundary, noise, sigma, cache } = setup;
   const request = setup.points === 'auto' ? { tolerance: study.grid.tolerance } : { points: setup.points };
   const planFor = (factor: number) =>
-    cache(
-      `plan ${factor} ${JSON.stringify(request)} ${'points' in request ? sigma : Math.floor(2 * Math.log2(sigma) + 1e-12)}`,
-      () => new NoisyPlan(model, boundary, noise, sigma, request, factor),
+    cache(`plan ${factor} ${JSON.stringify(request)} ${'points' in request ? sigma : levelIndex(sigma)}`, () =>
+      planOrRefuse(() => new NoisyPlan(model, boundary, noise, sigma, request, factor), sigma),
     );
   const main = new NoisySolver(planFor(1), sigma, checkpoint);
   const finer = uncertainties ? new NoisySolver(planFor(FINER), sigma, checkpoint) : null;
@@ -54,8 +55,29 @@ export function noisyCase(
   if (!resolved)
     warn({
       code: 'grid-too-coarse',
-      message: `${x.length} points are too few for sigma ${sigma}: about ${enough} are needed`,
+      message:
+        setup.points === 'auto'
+          ? `the slope of the map grows without bound and the ends fold every image back: ${x.length} points carry most of it, no number carries all`
+          : `${x.length} points are too few for sigma ${sigma}: about ${enough} are needed`,
     });
+  if (!model.complete)
+    warn({
+      code: 'breaks-incomplete',
+      message: 'the map has more breaks than can be listed; numbers may be less certain than stated',
+    });
+  if ((ask.stationary || ask.spectrum || ask.lyapunov || ask.exit) && !stays(main, finer)) {
+    warn({
+      code: 'nothing-stays',
+      message:
+        'everything leaves the domain at once, or is forgotten to the last digit: no eigenvalue stands above its uncertainty, so there is no long-run density, exponent or rate',
+    });
+    if (ask.density) out.density = evolution(study, setup, main, finer, warn);
+    if (ask.spectrum) out.spectrum = { noisy: [], gap: null, relaxationTime: null };
+    if (ask.lyapunov) out.lyapunov = { exponents: [null], value: null };
+    if (ask.exit)
+      out.exit = { ...exit(study, setup, main, finer, warn), rate: null, meanTime: null } as ResultCase['exit'];
+    return out;
+  }
 
   /** A number from both grids with its error bar. */
   const both = (
@@ -66,12 +88,44 @@ export function noisyCase(
     return bound(value, errorBar(value, finer ? of(finer) : null, floor(value)));
   };
 
+  if (ask.stationary && finer) warnIfNotUnique(main, finer, warn);
   if (ask.density) out.density = evolution(study, setup, main, finer, warn);
   if (ask.stationary) out.stationary = stationary(study, setup, main, finer, both);
   if (ask.spectrum) out.spectrum = spectrum(ask.spectrum.count, main, finer, warn);
   if (ask.exit) out.exit = exit(study, setup, main, finer, warn);
   if (ask.lyapunov) out.lyapunov = lyapunov(main, both, warn);
   return out;
+}
+
+/** Warns where two leading eigenvalues cannot be told apart: any mixture of their densities is as stationary. */
+function warnIfNotUnique(main: NoisySolver, finer: NoisySolver, warn: Warn): void {
+  const [first, second] = spectrumEntries(main.spectrum(2).pairs, finer.spectrum(2).pairs, 1);
+  if (!first || !second || first.uncertainty === null || second.uncertainty === null) return;
+  if (first.modulus - second.modulus > 4 * (first.uncertainty + second.uncertainty)) return;
+  warn({
+    code: 'not-unique',
+    message:
+      'the two leading eigenvalues cannot be told apart: the long-run density depends on the start, and what is given is one mixture',
+  });
+}
+
+/** false where not even the first eigenvalue is known to differ from zero. */
+function stays(main: NoisySolver, finer: NoisySolver | null): boolean {
+  const other = finer ? finer.spectrum(2).pairs : null;
+  return spectrumEntries(main.spectrum(2).pairs.slice(0, 1), other, 1).length > 0;
+}
+
+function planOrRefuse(make: () => NoisyPlan, sigma: number): NoisyPlan {
+  try {
+    return make();
+  } catch (error) {
+    if (!(error instanceof TooManyPoints)) throw error;
+    const [, allowed] = levelOf(error.allowed);
+    throw new StudyRefused(
+      'noise.sigma',
+      `${sigma} needs ${error.points} points with this map; allowed: ${Number(allowed.toPrecision(3))} and above (${MOST_POINTS} points), or the kind "none"`,
+    );
+  }
 }
 
 type Both = (of: (s: NoisySolver) => number, floor?: (value: number) => number) => Quantity | null;
@@ -263,18 +317,21 @@ function exit(
     const a = numbers(main);
     const b = finer ? numbers(finer) : null;
     const floor = (v: number) => 32 * EPS * Math.abs(v);
-    if (!a.solved.converged || b?.solved.converged === false)
+    const settled = a.solved.converged && b?.solved.converged !== false;
+    const fieldSettled = a.solved.fieldConverged && b?.solved.fieldConverged !== false;
+    if (!settled || !fieldSettled)
       warn({
         code: 'exit-not-settled',
-        message: 'exit times did not settle to the last digit: a second mode is nearly as slow as the exit itself',
+        message:
+          'the quasi-stationary density did not settle: a second mode is as slow as the first, or round-off hides both; what depends on it is not given',
       });
-    const quantity = (of: (n: ReturnType<typeof numbers>) => number) =>
-      bound(of(a), errorBar(of(a), b ? of(b) : null, floor(of(a))));
+    const quantity = (stands: boolean, of: (n: ReturnType<typeof numbers>) => number) =>
+      stands ? bound(of(a), errorBar(of(a), b ? of(b) : null, floor(of(a)))) : null;
     return {
-      rate: quantity((n) => n.rate),
-      meanTime: quantity((n) => n.mean),
-      meanTimeFrom: quantity((n) => n.from),
-      field: [...a.solved.field],
+      rate: quantity(settled, (n) => n.rate),
+      meanTime: quantity(settled, (n) => n.mean),
+      meanTimeFrom: quantity(fieldSettled, (n) => n.from),
+      field: fieldSettled ? [...a.solved.field] : null,
     };
   } catch (error) {
     if (!(error instanceof RangeError)) throw error;

@@ -53,6 +53,7 @@ export function modelOf(study: Study, parameters: Readonly<Record<string, number
       for (let i = 0; i < x.length; i++) out[i] = Math.log(Math.abs(out[i]));
     },
     breaks,
+    complete: found.complete,
     singular: merge([...rough, ...flat, ...ends], to - from),
     // ln|F'| of the branches themselves is singular where they pile up
     stretchSingular: merge([...rough, ...flat, ...ends, ...gaps.map((g) => g.point)], to - from),

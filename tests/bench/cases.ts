@@ -2,7 +2,7 @@ import { compileFormula } from '@/kernels/formula/compile-formula';
 import { parseFormula } from '@/kernels/formula/parse-formula';
 import { gaussian } from '@/kernels/noise/gaussian';
 import { boundaryOf } from '@/kernels/operators/ends';
-import { NoisyPlan } from '@/kernels/operators/noisy-plan';
+import { levelIndex, NoisyPlan } from '@/kernels/operators/noisy-plan';
 import { NoisySolver } from '@/kernels/solve/noisy-solver';
 import { railPoint } from '@/kernels/solve/rail-point';
 import { modelOf } from '@/kernels/study/model-of';
@@ -82,7 +82,7 @@ function rail(tolerance: number, factor: number) {
   const map = model();
   const plans = new Map<number, NoisyPlan>();
   return RAIL.map((sigma) => {
-    const level = Math.floor(2 * Math.log2(sigma) + 1e-12);
+    const level = levelIndex(sigma);
     let plan = plans.get(level);
     if (!plan) {
       plan = new NoisyPlan(map, boundary, gaussian, sigma, { tolerance }, factor);
