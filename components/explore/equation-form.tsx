@@ -6,10 +6,8 @@ import { noiseLevel } from '@/lib/shared/bench-study';
 import { formatCount } from '@/lib/shared/format-number';
 import { digitStepper, linearStepper } from '@/lib/shared/step-number';
 import { useExplore, useSystem } from './explore-context';
-import { withInterval, withSigma } from './study-edits';
+import { sigmaLimits, withInterval, withSigma } from './study-edits';
 import { anywhere, TypesetEquation } from './typeset-equation';
-
-const positive = { min: 1e-12, max: 1e300 };
 
 /** The study as its equation; every number in it can be changed where it stands. */
 export function EquationForm() {
@@ -21,6 +19,7 @@ export function EquationForm() {
   const variable = study.system.variables?.[0] ?? system?.variable ?? 'x';
   const { from, to, ends } = study.domain[0];
   const sigma = noiseLevel(study);
+  const limits = sigmaLimits(study);
   const sigmaFault = useExplore((state) => faultAt(state, 'noise.sigma')?.message);
   const domainFault = useExplore((state) => faultAt(state, 'domain')?.message);
   const step = linearStepper(anywhere, to - from);
@@ -44,8 +43,8 @@ export function EquationForm() {
           <AdjustableNumber
             label="sigma"
             value={sigma}
-            bounds={positive}
-            stepper={digitStepper(positive)}
+            bounds={limits}
+            stepper={digitStepper(limits)}
             onChange={(next, moving) => edit((current) => withSigma(current, next), moving)}
             onRest={rest}
             fault={sigmaFault}

@@ -23,7 +23,7 @@ export function Settings() {
   const open = opened || typed;
   return (
     <div className="screen-only mt-2 grow">
-      <div className="flex flex-wrap items-center gap-x-5 gap-y-2">
+      <div className="flex flex-wrap items-start gap-x-5 gap-y-2">
         <SystemPicker />
         {open && <FormulaField />}
         {!typed && (

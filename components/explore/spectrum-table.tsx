@@ -45,9 +45,7 @@ export function SpectrumTable({ rows, settled, chosen, onChoose }: SpectrumTable
               {formatDigits(row.modulus, { uncertainty: row.uncertainty, digits: row.uncertainty === null ? 4 : 10 })}
             </td>
             <td className="pl-2 text-right">
-              {row.pair ? '±' : ''}
-              {formatDigits(row.phase, { uncertainty: row.phaseUncertainty, digits: row.uncertainty === null ? 3 : 5 })}
-              {row.phase === 0 ? '' : `${NBSP}π`}
+              <Phase row={row} />
             </td>
             <td className="pl-2 text-right">
               {formatDigits(row.lasts, {
@@ -64,4 +62,10 @@ export function SpectrumTable({ rows, settled, chosen, onChoose }: SpectrumTable
       </tbody>
     </table>
   );
+}
+
+/** In units of pi; a real eigenvalue's is 0 or pi exactly. */
+function Phase({ row: { phase, pair, phaseUncertainty } }: { row: EigenvalueRow }) {
+  if (!pair) return phase === 0 ? '0' : 'π';
+  return `±${formatDigits(phase, { uncertainty: phaseUncertainty, digits: phaseUncertainty === null ? 3 : 5 })}${NBSP}π`;
 }

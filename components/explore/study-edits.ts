@@ -59,6 +59,13 @@ export function withFormula(study: StudyFile, formula: string, variable: string,
   };
 }
 
+/** Levels that can be typed: a hundred-thousandth to a thousand times the domain's length, as the engine takes them. */
+export function sigmaLimits(study: StudyFile): Bounds {
+  const { from, to } = study.domain[0];
+  const length = Math.abs(to - from) || 1;
+  return { min: Number((length * 1e-5).toPrecision(3)), max: Number((length * 1e3).toPrecision(3)) };
+}
+
 /** The slider's reach: from a thousandth to half of the domain's length. */
 export function sigmaBounds(study: StudyFile): Bounds {
   const { from, to } = study.domain[0];

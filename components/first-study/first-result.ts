@@ -5,7 +5,7 @@ import result from './result.json';
 
 /**
  * The bench's first study as computed ahead, so that a page is drawn before any script has run:
- * `npm run -s compute -- components/first-study/study.json --out components/first-study/result.json`.
+ * `npm run -s compute -- components/first-study/study.json --out components/first-study/result.json`, then `npm run format`.
  * A test computes it again and compares number by number.
  */
 export const FIRST_RESULT = result as unknown as Result;

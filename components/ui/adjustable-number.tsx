@@ -1,7 +1,7 @@
 'use client';
 
 import { type KeyboardEvent, type PointerEvent, useId, useRef, useState } from 'react';
-import { formatEntry } from '@/lib/shared/format-number';
+import { formatEntry, formatTick } from '@/lib/shared/format-number';
 import { parseNumber } from '@/lib/shared/parse-number';
 import { plainDecimal } from '@/lib/shared/plain-decimal';
 import { type Bounds, COARSE, type Stepper } from '@/lib/shared/step-number';
@@ -49,7 +49,7 @@ export function AdjustableNumber({
     if ('fault' in parsed) return setTyped({ text: written, fault: parsed.fault });
     const { min, max } = bounds;
     if (parsed.value < min || parsed.value > max) {
-      const allowed = `allowed: ${formatEntry(min)} to ${formatEntry(max)}`;
+      const allowed = `allowed: ${formatTick(min)} to ${formatTick(max)}`;
       return setTyped({ text: written, fault: `${label} = ${written.trim()}; ${allowed}` });
     }
     setTyped(null);
