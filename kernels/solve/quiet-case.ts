@@ -12,6 +12,15 @@ import { gapOf } from './spectrum-entries';
 
 type Warn = (w: Omit<Warning, 'at'>) => void;
 
+/**
+ * The cells that uncertainties come from, and what their difference is multiplied by. Errors fall like n^-1/2 to 1/n:
+ * up to 4096 cells, three times as many show 0.4 to 0.7 of the error; beyond, 0.79 times as many show 0.12 to 0.27.
+ * Neither number divides the other, so that edges fall elsewhere.
+ */
+export function comparisonOf(cells: number): { cells: number; factor: number } {
+  return cells <= 4096 ? { cells: 3 * cells + 1, factor: 2.5 } : { cells: Math.round(0.79 * cells), factor: 12 };
+}
+
 /** Cells that "auto" takes: errors fall like one over their number or slower, so a small tolerance asks for the most. */
 const FEWEST = 1024;
 const MOST = 65_536;
@@ -19,20 +28,16 @@ const MOST = 65_536;
 const MOST_ENTRIES = 1_500_000;
 /** … where a spectrum is asked for: finer cells crowd the circle that cells cannot see through, and bring no eigenvalue nearer. */
 const MOST_FOR_SPECTRUM = 4096;
-/** The coarser cells that uncertainties come from; no divisor of the finer, so that edges fall elsewhere. */
-const COARSER = 0.79;
-/** Errors fall like n^-1/2 at worst: between n and 0.79 n cells they change by an eighth of themselves. */
-const SLOW = 12;
 /** Cells for the comparison beside a noisy result: as fine as a figure shows. */
 export const COMPARISON_CELLS = 512;
 /** What densities the cells' eigenvalues belong to. */
 const SPACE = 'densities constant on each cell (bounded variation in the limit of fine cells)';
 
 /**
- * One case of a study without noise, by cells: everything that was asked for, with uncertainties from coarser cells.
+ * One case of a study without noise, by cells: everything that was asked for, with uncertainties from other cells.
  *
- * Cells converge slowly (one over their number, or its root where the density has singularities), so error bars are twelve
- * times the difference.
+ * Cells converge slowly (one over their number, or its root where the density has singularities), so error bars are that
+ * difference times what `comparisonOf` says.
  */
 export function quietCase(
   study: Study,
@@ -52,10 +57,15 @@ export function quietCase(
         )
       : setup.points;
   const main = cellSolver(setup, fine, checkpoint);
-  const coarse = uncertainties ? cellSolver(setup, Math.max(4, Math.round(COARSER * fine)), checkpoint) : null;
+  const other = uncertainties ? cellSolver(setup, comparisonOf(fine).cells, checkpoint) : null;
   const both = (of: (s: CellSolver) => number): Quantity | null => {
     const value = of(main);
-    return bound(value, coarse ? SLOW * Math.abs(value - of(coarse)) + 1e-12 * Math.abs(value) + 1e-13 : null);
+    return bound(
+      value,
+      other
+        ? comparisonOf(main.operator.size).factor * Math.abs(value - of(other)) + 1e-12 * Math.abs(value) + 1e-13
+        : null,
+    );
   };
   const { x, weights } = main.operator;
   const out: Omit<ResultCase, 'at'> = {
@@ -64,10 +74,10 @@ export function quietCase(
       x: [[...x]],
       weights: [[...weights]],
       resolved: true,
-      compared: coarse ? [[coarse.operator.size]] : [],
+      compared: other ? [[other.operator.size]] : [],
     },
   };
-  if (ask.density) out.density = evolution(study, setup, main, coarse, warn);
+  if (ask.density) out.density = evolution(study, setup, main, other, warn);
   if (ask.stationary) {
     const mean = (s: CellSolver) => s.integral(s.stationary().map((v, i) => v * s.operator.x[i]));
     // a cell's mass is spread evenly: its own variance is h²/12
@@ -84,7 +94,7 @@ export function quietCase(
       covariance: [[both(variance)]],
       entropy: both((s) => -s.integral(s.stationary().map((v) => (v > 0 ? v * Math.log(v) : 0)))),
       quasi: main.loses,
-      uncertainty: coarse ? largestStepDifference(values, coarse.stationary()) : null,
+      uncertainty: other ? largestStepDifference(values, other.stationary()) : null,
       lostPerStep: both((s) => (s.loses ? s.integral(s.stationary().map((v, i) => v * s.operator.lost[i])) : 0)),
       secondWay: null,
     };
@@ -92,7 +102,7 @@ export function quietCase(
       out.stationary.deterministic = { x: [[...x]], values: [...values], method: 'cells' };
   }
   if (ask.spectrum) {
-    const entries = quietSpectrum(main, coarse, ask.spectrum.count);
+    const entries = quietSpectrum(main, other, ask.spectrum.count);
     out.spectrum = { deterministic: entries, ...gapOf(entries) };
     if (!out.spectrum.gap)
       warn({
@@ -100,7 +110,7 @@ export function quietCase(
         message: 'no second eigenvalue stands above its uncertainty; gap and relaxation time are not given',
       });
   }
-  if (ask.exit) out.exit = exit(ask.exit.start, study, setup, main, coarse, warn);
+  if (ask.exit) out.exit = exit(ask.exit.start, study, setup, main, other, warn);
   if (ask.lyapunov) {
     const value = both((s) => s.meanStretch(s.stationary()));
     if (!value)
@@ -120,18 +130,18 @@ export function cellSolver(setup: CaseSetup, cells: number, checkpoint: Checkpoi
 }
 
 /**
- * Eigenvalues of cells with what moving to coarser cells does to each; one that moves by more than a twentieth is
+ * Eigenvalues of cells with what moving to other cells does to each; one that moves by more than a twentieth is
  * marked unresolved.
  */
-export function quietSpectrum(main: CellSolver, coarse: CellSolver | null, count: number): Eigenvalue[] {
+export function quietSpectrum(main: CellSolver, other: CellSolver | null, count: number): Eigenvalue[] {
   const { pairs } = main.spectrum(Math.max(2, count));
-  const other: readonly EigenPair[] | null = coarse ? coarse.spectrum(Math.max(2, count)).pairs : null;
+  const partners: readonly EigenPair[] | null = other ? other.spectrum(Math.max(2, count + 2)).pairs : null;
   const entries: Eigenvalue[] = [];
   for (const p of pairs) {
     const modulus = Math.hypot(p.re, p.im);
-    const distance = other ? Math.min(1, ...other.map((q) => Math.hypot(p.re - q.re, p.im - q.im))) : null;
+    const distance = partners ? Math.min(1, ...partners.map((q) => Math.hypot(p.re - q.re, p.im - q.im))) : null;
     const roundOff = (p.residual + 1e-15) * Math.max(1, p.condition);
-    const uncertainty = distance === null ? null : SLOW * distance + roundOff;
+    const uncertainty = distance === null ? null : comparisonOf(main.operator.size).factor * distance + roundOff;
     if (modulus < Math.max(1e-9, roundOff)) continue;
     entries.push({
       re: p.re,
@@ -160,7 +170,7 @@ function evolution(
   study: Study,
   setup: CaseSetup,
   main: CellSolver,
-  coarse: CellSolver | null,
+  other: CellSolver | null,
   warn: Warn,
 ): ResultCase['density'] {
   const ask = study.ask.density;
@@ -181,18 +191,23 @@ function evolution(
     return kept;
   };
   const a = path(main);
-  const b = coarse ? path(coarse) : null;
+  const b = other ? path(other) : null;
   if (ask.start.kind === 'point' || ask.start.kind === 'samples')
     warn({ code: 'start-in-cells', message: 'without noise a point or a sample is spread over its cell' });
   return ask.at.map((at) => {
     const values = a.get(at) ?? new Float64Array(0);
-    const other = b?.get(at) ?? null;
+    const there = b?.get(at) ?? null;
     const mass = main.integral(values);
     return {
       at,
-      mass: bound(mass, other && coarse ? SLOW * Math.abs(mass - coarse.integral(other)) + 1e-13 : null),
+      mass: bound(
+        mass,
+        there && other
+          ? comparisonOf(main.operator.size).factor * Math.abs(mass - other.integral(there)) + 1e-13
+          : null,
+      ),
       values: [...values],
-      uncertainty: other ? largestStepDifference(values, other) : null,
+      uncertainty: there ? largestStepDifference(values, there) : null,
     };
   });
 }
@@ -210,7 +225,7 @@ function exit(
   study: Study,
   setup: CaseSetup,
   main: CellSolver,
-  coarse: CellSolver | null,
+  other: CellSolver | null,
   warn: Warn,
 ): ResultCase['exit'] {
   const none = { rate: null, meanTime: null, meanTimeFrom: null, field: null };
@@ -230,9 +245,12 @@ function exit(
   };
   try {
     const a = numbers(main);
-    const b = coarse ? numbers(coarse) : null;
+    const b = other ? numbers(other) : null;
     const quantity = (of: (n: ReturnType<typeof numbers>) => number) =>
-      bound(of(a), b ? SLOW * Math.abs(of(a) - of(b)) + 1e-12 * Math.abs(of(a)) : null);
+      bound(
+        of(a),
+        b ? comparisonOf(main.operator.size).factor * Math.abs(of(a) - of(b)) + 1e-12 * Math.abs(of(a)) : null,
+      );
     return {
       rate: quantity((n) => n.rate),
       meanTime: quantity((n) => n.mean),

@@ -32,7 +32,7 @@ export function spectrumEntries(
         if (d < distance) [nearest, distance] = [i, d];
       });
       if (nearest >= 0) free.splice(nearest, 1);
-      const roundOff = (p.residual + 1.5 * EPS * norm) * Math.max(1, p.condition);
+      const roundOff = (p.residual + EPS * norm) * Math.max(1, p.condition);
       uncertainty = (distance <= 1e-9 ? 2 : 5) * Math.min(distance, 1) + roundOff;
       if (!(uncertainty < modulus)) continue;
     } else if (modulus < 1e-13 * norm * Math.min(1e6, Math.max(1, p.condition))) continue;
