@@ -11,7 +11,7 @@ export function KeyNumbers() {
   const absorbing = useExplore((state) => state.study.domain.some(({ ends }) => losesMass(ends)));
   const settled = picture?.settled ?? false;
   const why = (...codes: string[]) => {
-    if (picture === null) return '…';
+    if (picture === null || !settled) return '…';
     return picture.warnings.find(({ code }) => codes.includes(code))?.message ?? 'not known here';
   };
   const { exit, spectrum, lyapunov } = picture?.case ?? {};

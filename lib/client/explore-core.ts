@@ -113,7 +113,7 @@ function withKept(fresh: ResultCase, study: StudyFile, last: Picture | null): Re
         deterministic: spectrum.deterministic ?? (same ? before.spectrum?.deterministic : undefined),
       },
     }),
-    ...(exit && { exit: { ...exit, meanTime: withError(exit.meanTime, before.exit?.meanTime) ?? null } }),
+    exit: exit ?? passingExit(stationary?.lostPerStep, before.exit?.meanTime),
     ...(lyapunov && {
       lyapunov: {
         ...lyapunov,
@@ -122,6 +122,16 @@ function withKept(fresh: ResultCase, study: StudyFile, last: Picture | null): Re
       },
     }),
   };
+}
+
+/** Below this the mass lost per step has too few true digits for a mean exit time; the full pass sums it without loss. */
+const LEAST_LOSS = 1e-9;
+
+/** While something moves the mean exit time is that of the mass lost per step, 1/(1 - first eigenvalue). */
+function passingExit(lost: Quantity | null | undefined, last: Quantity | null | undefined): ResultCase['exit'] {
+  if (!lost || lost.value < LEAST_LOSS) return undefined;
+  const meanTime: Quantity = { value: 1 / lost.value, uncertainty: 0, kind: 'bound' };
+  return { rate: null, meanTime: withError(meanTime, last), meanTimeFrom: null, field: null };
 }
 
 /** The relative uncertainty is kept: an exit time may change by powers of ten between two passes. */

@@ -79,4 +79,15 @@ describe('the picture', () => {
     expect(faultAt(after, 'domain')?.message).toBe('from must be below to');
     expect(faultAt(after, 'noise.sigma')).toBeUndefined();
   });
+
+  it('while it moves the mean exit time is one over the mass lost per step, as far as that is known', () => {
+    const lossy = (value: number) => ({
+      ...stationary,
+      lostPerStep: { value, uncertainty: 0, kind: 'bound' as const },
+    });
+    const live = pictured(state, resultOf({ stationary: lossy(0.001) }), at(0.02), 'live', 0.01);
+    expect(live.picture?.case.exit?.meanTime?.value).toBeCloseTo(1000, 9);
+    const rare = pictured(state, resultOf({ stationary: lossy(1e-12) }), at(0.02), 'live', 0.01);
+    expect(rare.picture?.case.exit).toBeUndefined();
+  });
 });

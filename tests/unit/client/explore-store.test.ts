@@ -56,6 +56,7 @@ describe('the bench', () => {
     waiting?.();
     answer();
     expect(sent.map(({ pass }) => pass)).toEqual(['live', 'full']);
+    expect(sent.map(({ study }) => (study as StudyFile).ask.exit)).toEqual([undefined, {}]);
     expect(store.getState().picture?.settled).toBe(true);
     expect(store.getState().computing).toBe(false);
   });
