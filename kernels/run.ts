@@ -4,7 +4,7 @@ import { boundaryOf } from './operators/ends';
 import type { Result, ResultCase, Warning } from './result';
 import type { CaseSetup } from './solve/case-setup';
 import { noisyCase } from './solve/noisy-case';
-import { COMPARISON_CELLS, cellSolver, comparisonOf, quietCase, quietSpectrum } from './solve/quiet-case';
+import { COMPARISON_CELLS, cellSolver, coarserCells, quietCase, quietSpectrum } from './solve/quiet-case';
 import type { Study } from './spec';
 import { modelOf } from './study/model-of';
 import { axisValues } from './study/parse-study';
@@ -109,7 +109,7 @@ function addComparison(
     `comparison ${uncertainties} ${ask.spectrum?.deterministic ? ask.spectrum.count : 0}`,
     () => {
       const main = cellSolver(setup, COMPARISON_CELLS, checkpoint);
-      const coarse = uncertainties ? cellSolver(setup, comparisonOf(COMPARISON_CELLS).cells, checkpoint) : null;
+      const coarse = uncertainties ? cellSolver(setup, coarserCells(COMPARISON_CELLS), checkpoint) : null;
       return {
         density: { x: [[...main.operator.x]], values: [...main.stationary()], method: 'cells' as const },
         entries: ask.spectrum?.deterministic ? quietSpectrum(main, coarse, ask.spectrum.count) : [],

@@ -12,14 +12,17 @@ import { gapOf } from './spectrum-entries';
 
 type Warn = (w: Omit<Warning, 'at'>) => void;
 
+/** Number of cells that uncertainties come from: finer ones where that is cheap; no multiple, so that edges fall elsewhere. */
+const comparisonCells = (cells: number) => (cells <= 4096 ? 3 * cells + 1 : coarserCells(cells));
+
+/** Coarser cells with other edges: the cheap comparison. */
+export const coarserCells = (cells: number) => Math.round(0.79 * cells);
+
 /**
- * The cells that uncertainties come from, and what their difference is multiplied by. Errors fall like n^-1/2 to 1/n:
- * up to 4096 cells, three times as many show 0.4 to 0.7 of the error; beyond, 0.79 times as many show 0.12 to 0.27.
- * Neither number divides the other, so that edges fall elsewhere.
+ * What the difference between two numbers of cells is multiplied by. Errors fall like n^-1/2 to 1/n: three times as
+ * many cells show 0.4 to 0.7 of the error, 0.79 times as many 0.12 to 0.27.
  */
-export function comparisonOf(cells: number): { cells: number; factor: number } {
-  return cells <= 4096 ? { cells: 3 * cells + 1, factor: 2.5 } : { cells: Math.round(0.79 * cells), factor: 12 };
-}
+const safety = (main: CellSolver, other: CellSolver) => (other.operator.size > main.operator.size ? 2.5 : 12);
 
 /** Cells that "auto" takes: errors fall like one over their number or slower, so a small tolerance asks for the most. */
 const FEWEST = 1024;
@@ -37,7 +40,7 @@ const SPACE = 'densities constant on each cell (bounded variation in the limit o
  * One case of a study without noise, by cells: everything that was asked for, with uncertainties from other cells.
  *
  * Cells converge slowly (one over their number, or its root where the density has singularities), so error bars are that
- * difference times what `comparisonOf` says.
+ * difference times what `safety` says.
  */
 export function quietCase(
   study: Study,
@@ -57,14 +60,12 @@ export function quietCase(
         )
       : setup.points;
   const main = cellSolver(setup, fine, checkpoint);
-  const other = uncertainties ? cellSolver(setup, comparisonOf(fine).cells, checkpoint) : null;
+  const other = uncertainties ? cellSolver(setup, comparisonCells(fine), checkpoint) : null;
   const both = (of: (s: CellSolver) => number): Quantity | null => {
     const value = of(main);
     return bound(
       value,
-      other
-        ? comparisonOf(main.operator.size).factor * Math.abs(value - of(other)) + 1e-12 * Math.abs(value) + 1e-13
-        : null,
+      other ? safety(main, other) * Math.abs(value - of(other)) + 1e-12 * Math.abs(value) + 1e-13 : null,
     );
   };
   const { x, weights } = main.operator;
@@ -141,7 +142,7 @@ export function quietSpectrum(main: CellSolver, other: CellSolver | null, count:
     const modulus = Math.hypot(p.re, p.im);
     const distance = partners ? Math.min(1, ...partners.map((q) => Math.hypot(p.re - q.re, p.im - q.im))) : null;
     const roundOff = (p.residual + 1e-15) * Math.max(1, p.condition);
-    const uncertainty = distance === null ? null : comparisonOf(main.operator.size).factor * distance + roundOff;
+    const uncertainty = distance === null || !other ? null : safety(main, other) * distance + roundOff;
     if (modulus < Math.max(1e-9, roundOff)) continue;
     entries.push({
       re: p.re,
@@ -200,12 +201,7 @@ function evolution(
     const mass = main.integral(values);
     return {
       at,
-      mass: bound(
-        mass,
-        there && other
-          ? comparisonOf(main.operator.size).factor * Math.abs(mass - other.integral(there)) + 1e-13
-          : null,
-      ),
+      mass: bound(mass, there && other ? safety(main, other) * Math.abs(mass - other.integral(there)) + 1e-13 : null),
       values: [...values],
       uncertainty: there ? largestStepDifference(values, there) : null,
     };
@@ -247,10 +243,7 @@ function exit(
     const a = numbers(main);
     const b = other ? numbers(other) : null;
     const quantity = (of: (n: ReturnType<typeof numbers>) => number) =>
-      bound(
-        of(a),
-        b ? comparisonOf(main.operator.size).factor * Math.abs(of(a) - of(b)) + 1e-12 * Math.abs(of(a)) : null,
-      );
+      bound(of(a), b ? safety(main, other) * Math.abs(of(a) - of(b)) + 1e-12 * Math.abs(of(a)) : null);
     return {
       rate: quantity((n) => n.rate),
       meanTime: quantity((n) => n.mean),
