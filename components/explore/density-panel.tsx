@@ -13,7 +13,8 @@ import { DensityLedger } from './density-ledger';
 import { useExplore } from './explore-context';
 import { resultNotes } from './result-notes';
 
-const HEIGHT = 352;
+// Low enough on a phone to stand above the noise slider; the class of the drawing's box has the same two heights.
+const heightFor = (width: number) => (width < 508 ? 260 : 352);
 
 export function DensityPanel() {
   const picture = useExplore((state) => state.picture);
@@ -74,7 +75,7 @@ export function DensityPanel() {
       })}
       notes={() => resultNotes(picture)}
     >
-      <div ref={ref} className="relative" style={{ height: HEIGHT }}>
+      <div ref={ref} className="relative h-[260px] overflow-hidden min-[540px]:h-[352px]">
         <DensityFigure
           noisy={noisy}
           without={without}
@@ -83,7 +84,7 @@ export function DensityPanel() {
           variable={unit ? `${name}, ${unit}` : name}
           title={title}
           width={width}
-          height={HEIGHT}
+          height={heightFor(width)}
           at={at}
         />
         <ReadoutSlider
