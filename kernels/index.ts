@@ -1,7 +1,11 @@
 export { type Checkpoint, Stopped } from './core/checkpoint';
+export { type Mode, type ModeSide, mode } from './mode';
+export { type RailOptions, rail } from './rail';
 export type { Eigenvalue, Quantity, Result, ResultCase, Warning } from './result';
 export { resultSchema } from './result';
-export { type RunCache, type RunOptions, run, sweepPoints } from './run';
+export { type RunOptions, run, sweepPoints } from './run';
+export type { RunCache } from './solve/case-setup';
+export type { RailPoint } from './solve/rail-point';
 export type { Ends, StartDensity, Study, StudyFile } from './spec';
 export { LIMITS, studySchema } from './spec';
 export type { Fault } from './study/fault';

@@ -1,17 +1,11 @@
 import { type Checkpoint, neverStop } from './core/checkpoint';
-import { gaussian } from './noise/gaussian';
-import { boundaryOf } from './operators/ends';
 import type { Result, ResultCase, Warning } from './result';
-import type { CaseSetup } from './solve/case-setup';
+import { type CaseSetup, caseSetup, type RunCache } from './solve/case-setup';
 import { noisyCase } from './solve/noisy-case';
 import { COMPARISON_CELLS, cellSolver, coarserCells, quietCase, quietSpectrum } from './solve/quiet-case';
 import type { Study } from './spec';
-import { modelOf } from './study/model-of';
 import { axisValues } from './study/parse-study';
 import { ENGINE } from './version';
-
-/** Things made for a system that later runs may use again; a host keeps one as long as it likes. */
-export type RunCache = Map<string, Map<string, unknown>>;
 
 export interface RunOptions {
   /** where it runs, as the result shall say: "node 20.20.2", a browser's name */
@@ -23,8 +17,6 @@ export interface RunOptions {
   /** grids, pushes and cell matrices of earlier runs; at most eight systems are kept in it */
   readonly cache?: RunCache;
 }
-
-const SYSTEMS_KEPT = 8;
 
 /**
  * Computes a study: one case per point of the sweep, in order, the first axis slow.
@@ -66,30 +58,8 @@ function computeCase(
   cache: RunCache,
   warn: (w: Omit<Warning, 'at'>) => void,
 ): Omit<ResultCase, 'at'> {
-  const { noise, domain, grid } = study;
-  const parameters = { ...study.system.parameters };
-  let sigma = noise.sigma === undefined ? 0 : [noise.sigma].flat()[0];
-  for (const [over, value] of Object.entries(at)) {
-    if (over.startsWith('parameters.')) parameters[over.slice('parameters.'.length)] = value;
-    else sigma = value;
-  }
-  const own = systemCache(cache, JSON.stringify([study.system, parameters, domain]));
-  const keep = <T>(key: string, make: () => T): T => {
-    if (!own.has(key)) own.set(key, make());
-    return own.get(key) as T;
-  };
-  const [{ from, to, ends }] = domain;
-  const setup: CaseSetup = {
-    model: keep('model', () => modelOf(study, parameters)),
-    boundary: boundaryOf(from, to, ends),
-    noise: gaussian,
-    sigma,
-    parameters,
-    points: [grid.points].flat()[0],
-    cache: keep,
-    checkpoint,
-  };
-  if (noise.kind === 'none') return quietCase(study, setup, uncertainties, checkpoint, warn);
+  const setup = caseSetup(study, at, cache, checkpoint);
+  if (study.noise.kind === 'none') return quietCase(study, setup, uncertainties, checkpoint, warn);
   const result = noisyCase(study, setup, uncertainties, checkpoint, warn);
   addComparison(study, setup, result, uncertainties, checkpoint);
   return result;
@@ -118,16 +88,4 @@ function addComparison(
   );
   if (ask.stationary?.deterministic && result.stationary) result.stationary.deterministic = density;
   if (ask.spectrum?.deterministic && result.spectrum) result.spectrum.deterministic = entries;
-}
-
-function systemCache(cache: RunCache, key: string): Map<string, unknown> {
-  let own = cache.get(key);
-  if (own) cache.delete(key);
-  else own = new Map();
-  cache.set(key, own); // most recent last
-  for (const oldest of cache.keys()) {
-    if (cache.size <= SYSTEMS_KEPT) break;
-    cache.delete(oldest);
-  }
-  return own;
 }

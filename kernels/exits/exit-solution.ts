@@ -21,7 +21,7 @@ export interface PositiveOperator extends OperatorPair {
 }
 
 /** Nodes up to which elimination is always used, and up to which it is used where sweeps would be slow. */
-const ALWAYS = 700;
+const ALWAYS = 260;
 const AT_MOST = 3000;
 
 /**

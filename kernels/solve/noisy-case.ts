@@ -1,14 +1,12 @@
 import type { Checkpoint } from '../core/checkpoint';
-import { MOST_POINTS, TooManyPoints } from '../grid/plan-panels';
 import type { StartSources } from '../grid/start-sources';
-import { levelIndex, levelOf, NoisyPlan } from '../operators/noisy-plan';
 import type { Quantity, ResultCase, Warning } from '../result';
 import type { Study } from '../spec';
 import type { EigenPair } from '../spectrum/arnoldi';
 import { startOf } from '../study/start-of';
-import { StudyRefused } from '../study/study-refused';
 import type { CaseSetup } from './case-setup';
 import { NoisySolver } from './noisy-solver';
+import { planOf } from './plan-of';
 import { bound, errorBar } from './quantity';
 import { denseWay } from './second-way';
 import { gapOf, spectrumEntries } from './spectrum-entries';
@@ -32,14 +30,9 @@ export function noisyCase(
   checkpoint: Checkpoint,
   warn: (w: Omit<Warning, 'at'>) => void,
 ): Omit<ResultCase, 'at'> {
-  const { model, boundary, noise, sigma, cache } = setup;
-  const request = setup.points === 'auto' ? { tolerance: study.grid.tolerance } : { points: setup.points };
-  const planFor = (factor: number) =>
-    cache(`plan ${factor} ${JSON.stringify(request)} ${'points' in request ? sigma : levelIndex(sigma)}`, () =>
-      planOrRefuse(() => new NoisyPlan(model, boundary, noise, sigma, request, factor), sigma),
-    );
-  const main = new NoisySolver(planFor(1), sigma, checkpoint);
-  const finer = uncertainties ? new NoisySolver(planFor(FINER), sigma, checkpoint) : null;
+  const { model, sigma } = setup;
+  const main = new NoisySolver(planOf(setup, study.grid.tolerance, 1), sigma, checkpoint);
+  const finer = uncertainties ? new NoisySolver(planOf(setup, study.grid.tolerance, FINER), sigma, checkpoint) : null;
   const { ask } = study;
   const { grid, resolved, enough } = main.plan;
   const x = grid.x;
@@ -113,19 +106,6 @@ function warnIfNotUnique(main: NoisySolver, finer: NoisySolver, warn: Warn): voi
 function stays(main: NoisySolver, finer: NoisySolver | null): boolean {
   const other = finer ? finer.spectrum(2).pairs : null;
   return spectrumEntries(main.spectrum(2).pairs.slice(0, 1), other, 1).length > 0;
-}
-
-function planOrRefuse(make: () => NoisyPlan, sigma: number): NoisyPlan {
-  try {
-    return make();
-  } catch (error) {
-    if (!(error instanceof TooManyPoints)) throw error;
-    const [, allowed] = levelOf(error.allowed);
-    throw new StudyRefused(
-      'noise.sigma',
-      `${sigma} needs ${error.points} points with this map; allowed: ${Number(allowed.toPrecision(3))} and above (${MOST_POINTS} points), or the kind "none"`,
-    );
-  }
 }
 
 type Both = (of: (s: NoisySolver) => number, floor?: (value: number) => number) => Quantity | null;

@@ -243,7 +243,7 @@ function exit(
     const a = numbers(main);
     const b = other ? numbers(other) : null;
     const quantity = (of: (n: ReturnType<typeof numbers>) => number) =>
-      bound(of(a), b ? safety(main, other) * Math.abs(of(a) - of(b)) + 1e-12 * Math.abs(of(a)) : null);
+      bound(of(a), b && other ? safety(main, other) * Math.abs(of(a) - of(b)) + 1e-12 * Math.abs(of(a)) : null);
     return {
       rate: quantity((n) => n.rate),
       meanTime: quantity((n) => n.mean),
