@@ -67,7 +67,7 @@ export const lineChecks: readonly PublishedCheck[] = [
           absolute: 1e-9,
         },
         known: 1e-14,
-        expected: 0.6931471805599453,
+        expected: Math.LN2,
       },
     ],
     source:

@@ -45,6 +45,22 @@ const tents: fc.Arbitrary<UnitMap> = fc.tuple(between(0.5, 3), between(0.5, 3)).
   breaks: [t / (s + t)],
 }));
 
+/** A smooth map without branches that pile up, ready for the operators. */
+export function plainModel(evaluate: MapModel['evaluate'], breaks: number[] = [], singular: number[] = []): MapModel {
+  return {
+    evaluate,
+    breaks,
+    singular,
+    complete: true,
+    stretch(x, out) {
+      const value = new Float64Array(x.length);
+      evaluate(x, value, out);
+      for (let i = 0; i < x.length; i++) out[i] = Math.log(Math.abs(out[i]));
+    },
+    stretchSingular: singular,
+  };
+}
+
 /** The map on [from, to]. */
 export function modelOn(map: UnitMap, from: number, to: number): MapModel {
   const length = to - from;
@@ -56,7 +72,7 @@ export function modelOn(map: UnitMap, from: number, to: number): MapModel {
     }
   };
   const breaks = map.breaks.map((u) => from + length * u);
-  return { evaluate, breaks, singular: findCriticalPoints({ evaluate }, from, to, breaks), accumulations: [] };
+  return plainModel(evaluate, breaks, findCriticalPoints({ evaluate }, from, to, breaks));
 }
 
 export interface NoisyMap {

@@ -1,19 +1,15 @@
 import { describe, expect, it } from 'vitest';
-import type { MapModel } from '@/kernels/core/map-model';
 import { MOST_POINTS, planPanels } from '@/kernels/grid/plan-panels';
 import { boundaryOf } from '@/kernels/operators/ends';
+import { plainModel } from '../../support/kernel-maps';
 
-const model = (slope: number, breaks: number[] = []): MapModel => ({
-  evaluate(x, out, s) {
+const model = (slope: number, breaks: number[] = []) =>
+  plainModel((x, out, s) => {
     for (let i = 0; i < x.length; i++) {
       out[i] = slope * x[i];
       if (s) s[i] = slope;
     }
-  },
-  breaks,
-  singular: [],
-  accumulations: [],
-});
+  }, breaks);
 const closed = boundaryOf(0, 1, 'reflecting');
 const plan = (request: { points: number } | { tolerance: number }, sigma = 0.01, factor = 1, m = model(2)) =>
   planPanels(m, closed, sigma, request, factor, 8.9 * sigma);

@@ -1,24 +1,19 @@
 import { describe, expect, it } from 'vitest';
-import type { MapModel } from '@/kernels/core/map-model';
 import { CellOperator } from '@/kernels/operators/cell-operator';
 import { boundaryOf } from '@/kernels/operators/ends';
+import { plainModel } from '../../support/kernel-maps';
 
-const model = (
-  f: (x: number) => number,
-  df: (x: number) => number,
-  breaks: number[] = [],
-  singular: number[] = [],
-): MapModel => ({
-  evaluate(x, out, slope) {
-    for (let i = 0; i < x.length; i++) {
-      out[i] = f(x[i]);
-      if (slope) slope[i] = df(x[i]);
-    }
-  },
-  breaks,
-  singular,
-  accumulations: [],
-});
+const model = (f: (x: number) => number, df: (x: number) => number, breaks: number[] = [], singular: number[] = []) =>
+  plainModel(
+    (x, out, slope) => {
+      for (let i = 0; i < x.length; i++) {
+        out[i] = f(x[i]);
+        if (slope) slope[i] = df(x[i]);
+      }
+    },
+    breaks,
+    singular,
+  );
 const shares = (operator: CellOperator, j: number) => {
   const unit = new Float64Array(operator.size);
   unit[j] = 1;
