@@ -57,7 +57,13 @@ export function solveExit(
   return byElimination(operator, leave, density, checkpoint);
 }
 
-/** Exits by elimination, n³/3 multiplications; see `Elimination`. */
+/**
+ * Exits by elimination, n³/3 multiplications; see `Elimination`.
+ *
+ * @param operator every entry positive; read as a dense matrix
+ * @param leave probability of leaving in one step from each node
+ * @param density estimate of the quasi-stationary density, improved by inverse iteration
+ */
 export function byElimination(
   operator: PositiveOperator,
   leave: Float64Array,
@@ -132,7 +138,13 @@ export function rateBySweeps(
   return { density: rho, perStep, converged: steady >= 4 };
 }
 
-/** Exits by sweeps of positive sums: n·band multiplications a sweep, as many sweeps as the second mode takes to die. */
+/**
+ * Exits by sweeps of positive sums: n·band multiplications a sweep, as many sweeps as the second mode takes to die.
+ *
+ * @param operator every entry positive
+ * @param leave probability of leaving in one step from each node
+ * @param density estimate of the quasi-stationary density
+ */
 export function bySweeps(
   operator: OperatorPair,
   leave: Float64Array,

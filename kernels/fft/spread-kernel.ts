@@ -97,7 +97,12 @@ export function readFrom({ count, first, weights }: Spread, line: Float64Array, 
   }
 }
 
-/** Adds what was spread beyond the circle's last point to its first points. */
+/**
+ * Adds what was spread beyond the circle's last point to its first points.
+ *
+ * @param line n + SPREAD_WIDTH entries, changed in place
+ * @param n points of the circle
+ */
 export function wrapTail(line: Float64Array, n: number): void {
   for (let k = 0; k < SPREAD_WIDTH; k++) {
     line[k] += line[n + k];
@@ -105,7 +110,12 @@ export function wrapTail(line: Float64Array, n: number): void {
   }
 }
 
-/** Repeats the circle's first points behind its last, so that stencils need no modulo. */
+/**
+ * Repeats the circle's first points behind its last, so that stencils need no modulo.
+ *
+ * @param line n + SPREAD_WIDTH entries, changed in place
+ * @param n points of the circle
+ */
 export function copyHead(line: Float64Array, n: number): void {
   for (let k = 0; k < SPREAD_WIDTH; k++) line[n + k] = line[k];
 }

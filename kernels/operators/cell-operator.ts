@@ -124,6 +124,8 @@ export class CellOperator implements OperatorPair {
 /**
  * How often the images of all cells together cross the domain: entries of a cell matrix are about this times the cells.
  *
+ * @param model the map; sampled at 1024 cells
+ * @param boundary domain and ends
  * @returns total variation of the map over the length of the domain, what lies beyond absorbing ends left out
  */
 export function crossingsOfDomain(model: MapModel, boundary: Boundary): number {

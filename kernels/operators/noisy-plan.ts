@@ -125,6 +125,10 @@ function extentOf(model: MapModel, boundary: Boundary, { panels }: PanelGrid): [
 /**
  * Weight of a node in the quadrature of ln|F'|. A slope that rounds to zero beside a critical point weighs nothing; one
  * that is zero elsewhere belongs to a flat stretch, where the mean is −∞.
+ *
+ * @param weight quadrature weight of the node
+ * @param log ln|F'| there, −∞ where the slope rounds to zero
+ * @param x the node
  */
 export function stretchWeight(weight: number, log: number, x: number, model: MapModel, { from, to }: Boundary): number {
   if (log !== Number.NEGATIVE_INFINITY) return weight * log;

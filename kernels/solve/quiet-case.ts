@@ -8,7 +8,7 @@ import { startOf } from '../study/start-of';
 import type { CaseSetup } from './case-setup';
 import { CellSolver } from './cell-solver';
 import { bound } from './quantity';
-import { gapOf } from './spectrum-entries';
+import { gapOf, takeNearest } from './spectrum-entries';
 
 type Warn = (w: Omit<Warning, 'at'>) => void;
 
@@ -136,11 +136,11 @@ export function cellSolver(setup: CaseSetup, cells: number, checkpoint: Checkpoi
  */
 export function quietSpectrum(main: CellSolver, other: CellSolver | null, count: number): Eigenvalue[] {
   const { pairs } = main.spectrum(Math.max(2, count));
-  const partners: readonly EigenPair[] | null = other ? other.spectrum(Math.max(2, count + 2)).pairs : null;
+  const partners: EigenPair[] | null = other ? [...other.spectrum(Math.max(2, count + 4)).pairs] : null;
   const entries: Eigenvalue[] = [];
   for (const p of pairs) {
     const modulus = Math.hypot(p.re, p.im);
-    const distance = partners ? Math.min(1, ...partners.map((q) => Math.hypot(p.re - q.re, p.im - q.im))) : null;
+    const distance = partners ? takeNearest(partners, p) : null;
     const roundOff = (p.residual + 1e-15) * Math.max(1, p.condition);
     const uncertainty = distance === null || !other ? null : safety(main, other) * distance + roundOff;
     if (modulus < Math.max(1e-9, roundOff)) continue;

@@ -25,20 +25,32 @@ export function spectrumEntries(
     const modulus = Math.hypot(p.re, p.im);
     let uncertainty: number | null = null;
     if (free) {
-      let nearest = -1;
-      let distance = Number.POSITIVE_INFINITY;
-      free.forEach((q, i) => {
-        const d = Math.hypot(p.re - q.re, p.im - q.im);
-        if (d < distance) [nearest, distance] = [i, d];
-      });
-      if (nearest >= 0) free.splice(nearest, 1);
+      const distance = takeNearest(free, p);
       const roundOff = (p.residual + EPS * norm) * Math.max(1, p.condition);
-      uncertainty = (distance <= 1e-9 ? 2 : 5) * Math.min(distance, 1) + roundOff;
+      uncertainty = (distance <= 1e-9 ? 2 : 5) * distance + roundOff;
       if (!(uncertainty < modulus)) continue;
     } else if (modulus < 1e-13 * norm * Math.min(1e6, Math.max(1, p.condition))) continue;
     entries.push({ re: p.re, im: p.im, modulus, residual: p.residual, uncertainty, multiplicity: 1 });
   }
   return entries;
+}
+
+/**
+ * Distance to the nearest eigenvalue of another computation, which is then taken off the list: each serves once.
+ *
+ * @param partners eigenvalues not yet taken; the nearest is removed
+ * @param p the eigenvalue that looks for its partner
+ * @returns at most 1, the operator's norm
+ */
+export function takeNearest(partners: { re: number; im: number }[], p: { re: number; im: number }): number {
+  let nearest = -1;
+  let least = 1;
+  partners.forEach((q, i) => {
+    const d = Math.hypot(p.re - q.re, p.im - q.im);
+    if (d < least) [nearest, least] = [i, d];
+  });
+  if (nearest >= 0) partners.splice(nearest, 1);
+  return least;
 }
 
 /**

@@ -5,7 +5,7 @@ import { nearestName } from '../formula/nearest-name';
 import { parseFormula } from '../formula/parse-formula';
 import { LIMITS, type StartDensity, type Study, type SweepAxis, studySchema } from '../spec';
 import { findSystem, SYSTEMS } from '../systems/index';
-import { type Fault, quoted } from './fault';
+import { type Fault, pathText, quoted } from './fault';
 import { notYet } from './not-yet';
 import { schemaFaults } from './schema-faults';
 
@@ -21,6 +21,8 @@ export type ParsedStudy =
  *   found, each with its path and what is allowed. Never throws for bad input.
  */
 export function parseStudy(input: unknown): ParsedStudy {
+  const foreign = reservedKey(input, []);
+  if (foreign) return { faults: [foreign] };
   const read = studySchema.safeParse(input);
   if (!read.success) return { faults: schemaFaults(read.error.issues, input) };
   const early = notYet(read.data);
@@ -32,6 +34,25 @@ export function parseStudy(input: unknown): ParsedStudy {
   checkFormulas(study, faults);
   checkSweep(study, faults);
   return faults.length > 0 ? { faults } : { study };
+}
+
+/** Levels of nesting that a study file can have; samples in a start are the deepest. */
+const DEEPEST = 12;
+
+/** A key that JavaScript reads as something else than a key, or nesting beyond any study's; null where there is none. */
+function reservedKey(value: unknown, path: readonly (string | number)[]): Fault | null {
+  if (value === null || typeof value !== 'object') return null;
+  if (path.length > DEEPEST)
+    return { path: pathText(path), message: `is nested deeper than ${DEEPEST} levels; no study is` };
+  const entries = Array.isArray(value) ? value.entries() : Object.entries(value);
+  for (const [key, inner] of entries) {
+    if (key === '__proto__')
+      return { path: pathText([...path, key]), message: 'cannot be used as a name; choose another' };
+    if (typeof inner !== 'object') continue;
+    const fault = reservedKey(inner, [...path, key]);
+    if (fault) return fault;
+  }
+  return null;
 }
 
 /** Fills in what a catalogue entry knows, and the defaults that depend on other fields. */
@@ -159,7 +180,13 @@ function checkRanges(study: Study, faults: Fault[]): void {
   if (ask.exit) checkStart(ask.exit.start, 'ask.exit.start', study, faults);
 }
 
-/** Noise levels a domain of a given length admits: below, no affordable grid; above, one step forgets everything. */
+/**
+ * Noise levels that a domain admits: below, no affordable grid; above, one step forgets everything.
+ *
+ * @param from lower end of the domain
+ * @param to upper end
+ * @returns smallest and largest sigma, units of the variable
+ */
 export function sigmaRange(from: number, to: number): [number, number] {
   const tidy = (v: number) => Number(v.toPrecision(3));
   return [tidy(1e-5 * (to - from)), tidy(1e3 * (to - from))];

@@ -72,7 +72,9 @@ function faultsOf(issue: Issue, before: readonly PropertyKey[], input: unknown):
       const best = [...issue.errors].filter((b) => b.length > 0).sort((a, b) => score(a) - score(b))[0];
       if (!best) {
         const kinds = discriminators(path);
-        return fault(`got ${quoted(found)}; allowed: ${kinds || 'see the schema'}`);
+        return fault(
+          `${found === undefined ? 'is missing' : `got ${quoted(found)}`}; allowed: ${kinds || 'see the schema'}`,
+        );
       }
       return best.flatMap((inner) => faultsOf(inner, path, input));
     }
