@@ -132,6 +132,7 @@ export const faults = [
   {
     what: 'the content security policy allows eval in production',
     file: 'proxy.ts',
+    // biome-ignore lint/suspicious/noTemplateCurlyInString: it is the text of the source
     find: "${development ? \" 'unsafe-eval'\" : ''}",
     replace: " 'unsafe-eval'",
     project: 'unit',
