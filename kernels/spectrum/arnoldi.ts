@@ -92,11 +92,8 @@ export function arnoldi(
       const before = norm(w);
       if (m === kept && kept > 0) for (let j = 0; j < kept; j++) B.set(kept, j, b[j]);
       for (let pass = 0; pass < 2; pass++) {
-        for (let j = 0; j <= m; j++) {
-          const h = dot(basis[j], w);
-          addTo(w, -h, basis[j]);
-          B.set(j, m, B.get(j, m) + h);
-        }
+        const h = takeOut(w, basis, m + 1);
+        for (let j = 0; j <= m; j++) B.set(j, m, B.get(j, m) + h[j]);
       }
       const rest = norm(w);
       m++;
@@ -225,6 +222,55 @@ function combine(basis: Float64Array[], Q: Float64Array[], m: number, keep: numb
     for (let i = 0; i < m; i++) addTo(v, q[i], basis[i]);
     return v;
   });
+}
+
+/**
+ * w ← w − Σ h_j basis_j with h_j = ⟨basis_j, w⟩ (classical Gram–Schmidt; twice over it is as good as the modified one).
+ * Works through the vectors in blocks that stay in the processor's cache, two basis vectors at a time.
+ */
+function takeOut(w: Float64Array, basis: readonly Float64Array[], count: number): Float64Array {
+  const BLOCK = 1024;
+  const n = w.length;
+  const h = new Float64Array(count);
+  for (let from = 0; from < n; from += BLOCK) {
+    const to = Math.min(n, from + BLOCK);
+    let j = 0;
+    for (; j + 1 < count; j += 2) {
+      const a = basis[j];
+      const b = basis[j + 1];
+      let s = 0;
+      let t = 0;
+      for (let i = from; i < to; i++) {
+        s += a[i] * w[i];
+        t += b[i] * w[i];
+      }
+      h[j] += s;
+      h[j + 1] += t;
+    }
+    if (j < count) {
+      const a = basis[j];
+      let s = 0;
+      for (let i = from; i < to; i++) s += a[i] * w[i];
+      h[j] += s;
+    }
+  }
+  for (let from = 0; from < n; from += BLOCK) {
+    const to = Math.min(n, from + BLOCK);
+    let j = 0;
+    for (; j + 1 < count; j += 2) {
+      const a = basis[j];
+      const b = basis[j + 1];
+      const s = h[j];
+      const t = h[j + 1];
+      for (let i = from; i < to; i++) w[i] -= s * a[i] + t * b[i];
+    }
+    if (j < count) {
+      const a = basis[j];
+      const s = h[j];
+      for (let i = from; i < to; i++) w[i] -= s * a[i];
+    }
+  }
+  return h;
 }
 
 function dot(a: Float64Array, b: Float64Array): number {
