@@ -59,27 +59,21 @@ function computeCase(
   warn: (w: Omit<Warning, 'at'>) => void,
 ): Omit<ResultCase, 'at'> {
   const setup = caseSetup(study, at, cache, checkpoint);
-  if (study.noise.kind === 'none') return quietCase(study, setup, uncertainties, checkpoint, warn);
-  const result = noisyCase(study, setup, uncertainties, checkpoint, warn);
-  addComparison(study, setup, result, uncertainties, checkpoint);
+  if (study.noise.kind === 'none') return quietCase(study, setup, uncertainties, warn);
+  const result = noisyCase(study, setup, uncertainties, warn);
+  addComparison(study, setup, result, uncertainties);
   return result;
 }
 
 /** Density and spectrum without noise beside a noisy case, where asked for, on cells as fine as a figure shows. */
-function addComparison(
-  study: Study,
-  setup: CaseSetup,
-  result: Omit<ResultCase, 'at'>,
-  uncertainties: boolean,
-  checkpoint: Checkpoint,
-): void {
+function addComparison(study: Study, setup: CaseSetup, result: Omit<ResultCase, 'at'>, uncertainties: boolean): void {
   const { ask } = study;
   if (!ask.stationary?.deterministic && !ask.spectrum?.deterministic) return;
   const { density, entries } = setup.cache(
     `comparison ${uncertainties} ${ask.spectrum?.deterministic ? ask.spectrum.count : 0}`,
     () => {
-      const main = cellSolver(setup, COMPARISON_CELLS, checkpoint);
-      const coarse = uncertainties ? cellSolver(setup, coarserCells(COMPARISON_CELLS), checkpoint) : null;
+      const main = cellSolver(setup, COMPARISON_CELLS);
+      const coarse = uncertainties ? cellSolver(setup, coarserCells(COMPARISON_CELLS)) : null;
       return {
         density: { x: [[...main.operator.x]], values: [...main.stationary()], method: 'cells' as const },
         entries: ask.spectrum?.deterministic ? quietSpectrum(main, coarse, ask.spectrum.count) : [],

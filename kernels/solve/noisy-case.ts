@@ -1,4 +1,3 @@
-import type { Checkpoint } from '../core/checkpoint';
 import type { StartSources } from '../grid/start-sources';
 import type { Quantity, ResultCase, Warning } from '../result';
 import type { Study } from '../spec';
@@ -27,10 +26,9 @@ export function noisyCase(
   study: Study,
   setup: CaseSetup,
   uncertainties: boolean,
-  checkpoint: Checkpoint,
   warn: (w: Omit<Warning, 'at'>) => void,
 ): Omit<ResultCase, 'at'> {
-  const { model, sigma } = setup;
+  const { model, sigma, checkpoint } = setup;
   const main = new NoisySolver(planOf(setup, study.grid.tolerance, 1), sigma, checkpoint);
   const finer = uncertainties ? new NoisySolver(planOf(setup, study.grid.tolerance, FINER), sigma, checkpoint) : null;
   const { ask } = study;
@@ -83,7 +81,7 @@ export function noisyCase(
 
   if (ask.stationary && finer) warnIfNotUnique(main, finer, warn);
   if (ask.density) out.density = evolution(study, setup, main, finer, warn);
-  if (ask.stationary) out.stationary = stationary(study, setup, main, finer, both);
+  if (ask.stationary) out.stationary = stationary(setup, main, finer, both);
   if (ask.spectrum) out.spectrum = spectrum(ask.spectrum.count, main, finer, warn);
   if (ask.exit) out.exit = exit(study, setup, main, finer, warn);
   if (ask.lyapunov) out.lyapunov = lyapunov(main, both, warn);
@@ -193,7 +191,6 @@ function launchedAt(finer: NoisySolver, start: StartSources | undefined, main: N
 }
 
 function stationary(
-  study: Study,
   setup: CaseSetup,
   main: NoisySolver,
   finer: NoisySolver | null,

@@ -1,4 +1,3 @@
-import type { Checkpoint } from '../core/checkpoint';
 import { panelGrid } from '../grid/panels';
 import { CellOperator, crossingsOfDomain } from '../operators/cell-operator';
 import type { Eigenvalue, Quantity, ResultCase, Warning } from '../result';
@@ -42,13 +41,7 @@ const SPACE = 'densities constant on each cell (bounded variation in the limit o
  * Cells converge slowly (one over their number, or its root where the density has singularities), so error bars are that
  * difference times what `safety` says.
  */
-export function quietCase(
-  study: Study,
-  setup: CaseSetup,
-  uncertainties: boolean,
-  checkpoint: Checkpoint,
-  warn: Warn,
-): Omit<ResultCase, 'at'> {
+export function quietCase(study: Study, setup: CaseSetup, uncertainties: boolean, warn: Warn): Omit<ResultCase, 'at'> {
   const { ask } = study;
   const { model, boundary } = setup;
   const fine =
@@ -59,8 +52,8 @@ export function quietCase(
           Math.max(FEWEST, Math.ceil(1 / study.grid.tolerance)),
         )
       : setup.points;
-  const main = cellSolver(setup, fine, checkpoint);
-  const other = uncertainties ? cellSolver(setup, comparisonCells(fine), checkpoint) : null;
+  const main = cellSolver(setup, fine);
+  const other = uncertainties ? cellSolver(setup, comparisonCells(fine)) : null;
   const both = (of: (s: CellSolver) => number): Quantity | null => {
     const value = of(main);
     return bound(
@@ -122,7 +115,8 @@ export function quietCase(
 }
 
 /** The solver on so many cells; the cell matrix is kept in the case's cache. */
-export function cellSolver(setup: CaseSetup, cells: number, checkpoint: Checkpoint): CellSolver {
+export function cellSolver(setup: CaseSetup, cells: number): CellSolver {
+  const { checkpoint } = setup;
   const operator = setup.cache(
     `cells ${cells}`,
     () => new CellOperator(setup.model, setup.boundary, cells, checkpoint),
