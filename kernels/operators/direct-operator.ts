@@ -1,3 +1,4 @@
+import { type Checkpoint, neverStop } from '../core/checkpoint';
 import type { Boundary } from './ends';
 import { imagesOf } from './ends';
 import type { OperatorPair } from './operator-pair';
@@ -38,6 +39,7 @@ export class DirectOperator implements OperatorPair {
     density: (d: number) => number,
     reach: number,
     sourceWeights = weights,
+    checkpoint: Checkpoint = neverStop,
   ) {
     const n = x.length;
     this.size = n;
@@ -60,6 +62,7 @@ export class DirectOperator implements OperatorPair {
     const whole = reach > boundary.to - boundary.from; // images overlap: one full column is cheaper than many stretches
     for (let j = 0; j < images.length; j++) {
       const y = images[j];
+      if ((j & 31) === 0) checkpoint(j, images.length);
       if (Number.isNaN(y)) continue;
       if (whole) {
         room(n);

@@ -1,3 +1,4 @@
+import { type Checkpoint, neverStop } from '../core/checkpoint';
 import type { MapModel } from '../core/map-model';
 import { prepareSpread, type Spread } from '../fft/spread-kernel';
 import { type PanelGrid, panelGrid } from '../grid/panels';
@@ -38,11 +39,13 @@ export class NoisyPlan {
     sigma: number,
     request: { points: number } | { tolerance: number },
     factor: number,
+    checkpoint: Checkpoint = neverStop,
   ) {
     const [smallest, largest] = levelOf(sigma);
     // a grid of a stated size is laid out for the very sigma; "auto" for the smallest of the level
     const laidFor = 'points' in request ? sigma : smallest;
     const plan = planPanels(model, boundary, laidFor, request, factor, noise.reach * largest);
+    checkpoint(1, 3);
     this.model = model;
     this.boundary = boundary;
     this.noise = noise;
@@ -52,6 +55,7 @@ export class NoisyPlan {
     const images = new Float64Array(plan.grid.x.length);
     model.evaluate(plan.grid.x, images);
     this.images = images.map((y) => foldImage(boundary, y));
+    checkpoint(2, 3);
     this.push = new Push(
       plan.grid.x,
       plan.grid.weights,
@@ -70,7 +74,7 @@ export class NoisyPlan {
   }
 
   /** The same step by direct sums, keeping entries as far as `multiples` of sigma; the noise's full reach by default. */
-  directOperator(sigma: number, multiples = this.noise.fullReach): DirectOperator {
+  directOperator(sigma: number, multiples = this.noise.fullReach, checkpoint: Checkpoint = neverStop): DirectOperator {
     const { x, weights } = this.grid;
     return new DirectOperator(
       x,
@@ -79,6 +83,8 @@ export class NoisyPlan {
       this.boundary,
       (d) => this.noise.density(d, sigma),
       multiples * sigma,
+      weights,
+      checkpoint,
     );
   }
 

@@ -115,7 +115,7 @@ export class NoisySolver {
     const rate = 1 - this.kept();
     const { noise } = this.plan;
     const multiples = rate > 1e-10 ? Math.min(noise.fullReach, noise.reachOf(1e-16 * rate)) : noise.fullReach;
-    return this.plan.directOperator(this.sigma, multiples);
+    return this.plan.directOperator(this.sigma, multiples, this.checkpoint);
   }
 
   /** Density one step after point masses, on the nodes or at other prepared positions. */

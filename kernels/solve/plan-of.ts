@@ -17,7 +17,7 @@ export function planOf(setup: CaseSetup, tolerance: number, factor: number): Noi
   const shared = points === 'auto' ? levelIndex(sigma) : sigma;
   return cache(`plan ${factor} ${JSON.stringify(request)} ${shared}`, () => {
     try {
-      return new NoisyPlan(model, boundary, noise, sigma, request, factor);
+      return new NoisyPlan(model, boundary, noise, sigma, request, factor, setup.checkpoint);
     } catch (error) {
       if (!(error instanceof TooManyPoints)) throw error;
       const [, allowed] = levelOf(error.allowed);

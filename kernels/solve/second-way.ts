@@ -52,7 +52,7 @@ export function denseWay(
   const folded = images.map((y) => foldImage(boundary, y));
   const kernel = (d: number) => noise.density(d, sigma);
   const reach = noise.reach * sigma;
-  const operator = new DirectOperator(grid.x, grid.weights, folded, boundary, kernel, reach);
+  const operator = new DirectOperator(grid.x, grid.weights, folded, boundary, kernel, reach, grid.weights, checkpoint);
   const found = arnoldi((v, out) => operator.apply(v, out), grid.weights, {
     count,
     tolerance: 2e-14,
