@@ -124,7 +124,7 @@ describe('a run', () => {
   it.each([
     ['moderate noise', 0.01, 500],
     ['little noise', 0.004, 1200],
-    ['very little noise, where direct sums are large', 0.001, 6000],
+    ['very little noise, where direct sums are large', 0.001, 2500],
   ])('can be stopped within 100 ms at any time: %s', (_, sigma, stopAfter) => {
     const study = read(
       file({
