@@ -47,55 +47,45 @@ export class DirectOperator implements OperatorPair {
     this.sourceWeights = sourceWeights;
     this.mass = new Float64Array(n);
     const list = imagesOf(boundary, reach);
+    const whole = reach > boundary.to - boundary.from; // images overlap: one full column is cheaper than many stretches
     const source: number[] = [];
     const low: number[] = [];
     const high: number[] = [];
-    const offset: number[] = [];
-    let entries = new Float64Array(Math.max(1024, 64 * n));
-    let used = 0;
-    const room = (more: number) => {
-      if (used + more <= entries.length) return;
-      const larger = new Float64Array(Math.max(used + more, 2 * entries.length));
-      larger.set(entries.subarray(0, used));
-      entries = larger;
-    };
-    const whole = reach > boundary.to - boundary.from; // images overlap: one full column is cheaper than many stretches
+    const centre: number[] = [];
     for (let j = 0; j < images.length; j++) {
       const y = images[j];
-      if ((j & 31) === 0) checkpoint(j, images.length);
       if (Number.isNaN(y)) continue;
-      if (whole) {
-        room(n);
-        entries.fill(0, used, used + n);
-        for (const { sign, shift } of list)
-          for (let i = 0; i < n; i++) entries[used + i] += density(sign * x[i] + shift - y);
-        source.push(j);
-        low.push(0);
-        high.push(n);
-        offset.push(used);
-        used += n;
-        continue;
-      }
-      for (const { sign, shift } of list) {
-        const centre = sign * (y - shift);
-        if (centre + reach < x[0] || centre - reach > x[n - 1]) continue;
-        const lo = lowerBound(x, centre - reach);
-        const hi = lowerBound(x, centre + reach);
+      for (const { sign, shift } of whole ? [list[0]] : list) {
+        const c = sign * (y - shift);
+        const lo = whole ? 0 : lowerBound(x, c - reach);
+        const hi = whole ? n : lowerBound(x, c + reach);
         if (hi <= lo) continue;
-        room(hi - lo);
-        for (let i = lo; i < hi; i++) entries[used + i - lo] = density(x[i] - centre);
         source.push(j);
         low.push(lo);
         high.push(hi);
-        offset.push(used);
-        used += hi - lo;
+        centre.push(c);
       }
     }
     this.source = Int32Array.from(source);
     this.low = Int32Array.from(low);
     this.high = Int32Array.from(high);
-    this.offset = Int32Array.from(offset);
-    this.entries = entries.subarray(0, used);
+    this.offset = new Int32Array(source.length);
+    let used = 0;
+    for (let s = 0; s < source.length; s++) {
+      this.offset[s] = used;
+      used += high[s] - low[s];
+    }
+    const entries = new Float64Array(used);
+    for (let s = 0; s < source.length; s++) {
+      if ((s & 31) === 0) checkpoint(s, source.length);
+      const shift = this.offset[s] - low[s];
+      const c = centre[s];
+      if (whole) {
+        for (const { sign, shift: by } of list)
+          for (let i = 0; i < n; i++) entries[i + shift] += density(sign * x[i] + by - c);
+      } else for (let i = low[s]; i < high[s]; i++) entries[i + shift] = density(x[i] - c);
+    }
+    this.entries = entries;
   }
 
   /** number of stored entries: multiplications of one `apply` */

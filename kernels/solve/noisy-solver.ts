@@ -108,13 +108,19 @@ export class NoisySolver {
   }
 
   /**
-   * The direct operator with a band wide enough for its exits: an entry below 1e-16 of the rate adds nothing to it.
-   * Where the eigenvalue cannot tell the rate from zero the band is as wide as the noise's density reaches.
+   * The direct operator with a band wide enough for its exits: entries below 1e-16 of the rate add nothing to it.
+   * The rate is at least what leaves from where the density stands well above round-off; where nothing does, the band is
+   * as wide as the noise's density reaches.
    */
   private positiveOperator() {
-    const rate = 1 - this.kept();
     const { noise } = this.plan;
-    const multiples = rate > 1e-10 ? Math.min(noise.fullReach, noise.reachOf(1e-16 * rate)) : noise.fullReach;
+    const rho = this.stationary();
+    const leave = this.leaveProbability();
+    const sure = 1e-10 * rho.reduce((m, v) => Math.max(m, v), 0);
+    let rate = 0;
+    for (let i = 0; i < rho.length; i++) if (rho[i] > sure) rate += this.weights[i] * rho[i] * leave[i];
+    const multiples =
+      rate > 1e-280 ? Math.min(noise.fullReach, noise.reachOf(1e-16 * Math.min(1, rate))) : noise.fullReach;
     return this.plan.directOperator(this.sigma, multiples, this.checkpoint);
   }
 
