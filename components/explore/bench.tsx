@@ -4,6 +4,7 @@ import type { ReactNode } from 'react';
 import type { ExploreBeginning } from '@/lib/client/explore-store';
 import type { SystemEntry } from '@/lib/shared/system-entry';
 import { Address } from './address';
+import { BenchSource } from './bench-source';
 import { DensityPanel } from './density-panel';
 import { EquationForm } from './equation-form';
 import { ExploreProvider, useExplore } from './explore-context';
@@ -60,7 +61,7 @@ function BenchState({ children }: { children: ReactNode }) {
   );
   return (
     <div className="pt-4" data-bench={settled ? 'settled' : 'moving'} aria-busy={!settled}>
-      {children}
+      <BenchSource>{children}</BenchSource>
     </div>
   );
 }

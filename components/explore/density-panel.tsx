@@ -65,11 +65,13 @@ export function DensityPanel() {
         columns: [
           { name, unit: unit ?? '' },
           { name: 'density with noise', unit: unit ? `per ${unit}` : '' },
+          { name: 'uncertainty with noise, at most', unit: unit ? `per ${unit}` : '' },
           { name: 'density without noise', unit: unit ? `per ${unit}` : '' },
         ],
         rows: (curve?.x ?? []).map((x, i) => [
           x,
           quiet ? null : (curve?.values[i] ?? null),
+          quiet || picture?.settled !== true ? null : uncertainty,
           without ? cellValue(without, x) : null,
         ]),
       })}

@@ -2,9 +2,8 @@
 
 import { type ReactNode, useRef, useState } from 'react';
 import { TextButton } from '@/components/ui/text-button';
-import { figureSvg } from '@/lib/client/figure-svg';
-import { fileName, saveFile } from '@/lib/client/save-file';
-import { type NumberTable, numbersCsv } from '@/lib/shared/numbers-csv';
+import type { NumberTable } from '@/lib/shared/numbers-csv';
+import { DownloadButtons } from './downloads/download-buttons';
 import { NumberTableView } from './number-table';
 
 interface FigureFrameProps {
@@ -22,37 +21,45 @@ interface FigureFrameProps {
 /** What every figure has: caption, legend, the drawing with its readout, ledger line, numbers, files. */
 export function FigureFrame({ title, legend, ledger, numbers, notes, children }: FigureFrameProps) {
   const drawing = useRef<HTMLDivElement>(null);
+  const legendWords = useRef<HTMLSpanElement>(null);
+  const ledgerWords = useRef<HTMLParagraphElement>(null);
   const [open, setOpen] = useState(false);
-  const saveSvg = () => {
-    const svg = drawing.current?.querySelector('svg');
-    if (svg) saveFile(fileName(title, 'svg'), 'image/svg+xml', figureSvg(svg));
-  };
+  // Legend and ledger are elements; a file takes their words, entry by entry.
+  const words = () =>
+    [legendWords.current, ledgerWords.current]
+      // biome-ignore lint/performance/useDomNodeTextContent: only what is laid out tells entries from one another
+      .flatMap((element) => element?.innerText.split('\n') ?? [])
+      .map((line) => line.trim())
+      .filter((line) => line !== '')
+      .join('; ');
   return (
     <figure className="min-w-0">
       <figcaption className="flex flex-wrap items-baseline gap-x-4">
         <span className="font-semibold">{title}</span>
-        <span className="flex flex-wrap gap-x-4 text-muted">{legend}</span>
+        <span ref={legendWords} className="flex flex-wrap gap-x-4 text-muted">
+          {legend}
+        </span>
         {numbers && (
-          <span className="screen-only ml-auto flex gap-3 text-[0.8125rem]">
+          <span className="screen-only ml-auto flex flex-wrap justify-end gap-x-3 text-[0.8125rem]">
             <TextButton aria-expanded={open} onClick={() => setOpen(!open)}>
               Numbers
             </TextButton>
-            <TextButton onClick={saveSvg} aria-label={`Save SVG: ${title}`}>
-              SVG
-            </TextButton>
-            <TextButton
-              onClick={() => saveFile(fileName(title, 'csv'), 'text/csv', numbersCsv(made(numbers), made(notes)))}
-              aria-label={`Save CSV: ${title}`}
-            >
-              CSV
-            </TextButton>
+            <DownloadButtons
+              title={title}
+              drawing={drawing}
+              words={words}
+              numbers={() => made(numbers)}
+              notes={() => made(notes) ?? []}
+            />
           </span>
         )}
       </figcaption>
       <div ref={drawing} className="mt-1">
         {children}
       </div>
-      <p className="figures mt-1 min-h-5 text-[0.8125rem] text-muted">{ledger}</p>
+      <p ref={ledgerWords} className="figures mt-1 min-h-5 text-[0.8125rem] text-muted">
+        {ledger}
+      </p>
       {open && numbers && <NumberTableView table={made(numbers)} caption={title} />}
     </figure>
   );

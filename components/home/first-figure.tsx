@@ -3,6 +3,7 @@ import { KeyNumber } from '@/components/explore/key-number';
 import { DensityFigure } from '@/components/figures/density-figure';
 import { cellValue } from '@/components/figures/density-path';
 import { FigureFrame } from '@/components/figures/figure-frame';
+import { FigureSource } from '@/components/figures/figure-source';
 import { LegendMark } from '@/components/figures/legend-mark';
 import { FIRST_RESULT } from '@/components/first-study/first-result';
 import { formatCount, formatDigits, formatUncertainty } from '@/lib/shared/format-number';
@@ -19,45 +20,48 @@ export function FirstFigure() {
   const lost = stationary.lostPerStep;
   return (
     <div className="grid gap-x-12 gap-y-6 lg:grid-cols-[minmax(0,900px)_minmax(0,1fr)]">
-      <FigureFrame
-        title={title}
-        legend={
-          <>
-            <LegendMark mark="line-rain">with noise, σ = 0.0120</LegendMark>
-            <LegendMark mark="line-rust">without, {formatCount(without.values.length)} cells</LegendMark>
-          </>
-        }
-        ledger={
-          <span className="flex flex-wrap gap-x-5">
-            {lost && (
-              <span>mass lost per step {formatDigits(lost.value, { uncertainty: lost.uncertainty, digits: 3 })}</span>
-            )}
-            <span>
-              density {formatUncertainty(stationary.uncertainty)}, {formatCount(grid.points[0])} against{' '}
-              {formatCount(grid.compared[0][0])} points
+      <FigureSource study={FIRST_RESULT.study}>
+        <FigureFrame
+          title={title}
+          legend={
+            <>
+              <LegendMark mark="line-rain">with noise, σ = 0.0120</LegendMark>
+              <LegendMark mark="line-rust">without, {formatCount(without.values.length)} cells</LegendMark>
+            </>
+          }
+          ledger={
+            <span className="flex flex-wrap gap-x-5">
+              {lost && (
+                <span>mass lost per step {formatDigits(lost.value, { uncertainty: lost.uncertainty, digits: 3 })}</span>
+              )}
+              <span>
+                density {formatUncertainty(stationary.uncertainty)}, {formatCount(grid.points[0])} against{' '}
+                {formatCount(grid.compared[0][0])} points
+              </span>
             </span>
-          </span>
-        }
-        numbers={{
-          columns: [
-            { name: 'x', unit: '' },
-            { name: 'density with noise', unit: '' },
-            { name: 'density without noise', unit: '' },
-          ],
-          rows: noisy.x.map((x, i) => [x, noisy.values[i], cellValue(without, x)]),
-        }}
-        notes={[
-          `Smirr, study: ${JSON.stringify(FIRST_RESULT.study)}`,
-          `engine ${FIRST_RESULT.engine}, ${FIRST_RESULT.runtime}`,
-        ]}
-      >
-        <div className="hidden sm:block">
-          <DensityFigure {...drawing} width={900} height={340} />
-        </div>
-        <div className="sm:hidden">
-          <DensityFigure {...drawing} width={328} height={260} />
-        </div>
-      </FigureFrame>
+          }
+          numbers={{
+            columns: [
+              { name: 'x', unit: '' },
+              { name: 'density with noise', unit: '' },
+              { name: 'uncertainty with noise, at most', unit: '' },
+              { name: 'density without noise', unit: '' },
+            ],
+            rows: noisy.x.map((x, i) => [x, noisy.values[i], stationary.uncertainty, cellValue(without, x)]),
+          }}
+          notes={[
+            `Smirr, study: ${JSON.stringify(FIRST_RESULT.study)}`,
+            `engine ${FIRST_RESULT.engine}, ${FIRST_RESULT.runtime}`,
+          ]}
+        >
+          <div className="hidden sm:block">
+            <DensityFigure {...drawing} width={900} height={340} />
+          </div>
+          <div className="sm:hidden">
+            <DensityFigure {...drawing} width={328} height={260} />
+          </div>
+        </FigureFrame>
+      </FigureSource>
       <div className="lg:border-l lg:border-rule lg:pl-8">
         <dl className="grid grid-cols-2 gap-x-4 gap-y-3 sm:flex sm:flex-wrap sm:gap-x-12 lg:block lg:space-y-5">
           <KeyNumber

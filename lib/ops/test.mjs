@@ -2,6 +2,7 @@ import { chmodSync, mkdirSync, mkdtempSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { ensureChromium } from './browser.mjs';
 import { ensureBuild } from './build.mjs';
+import { ensureRsvg } from './drawing.mjs';
 import { ensurePackages } from './install.mjs';
 import { migrateDatabase } from './migrate.mjs';
 import { root } from './paths.mjs';
@@ -49,6 +50,7 @@ async function runEverything(tally, folder, undo, signal) {
   // What cannot be had is better heard of now than after minutes of tests.
   await ensurePackages();
   const chromium = await ensureChromium();
+  await ensureRsvg();
   // The user postgres must be able to pass through; what is secret inside has a mode of its own.
   chmodSync(folder, 0o755);
   const cluster = await startCluster(folder, { durable: false, wantedPort: await freePort() });
