@@ -13,7 +13,7 @@ import { StudyRefused } from './study-refused';
  * The map of a study at given parameters: values, slopes, breaks, points where ln|F'| is singular.
  *
  * @param parameters values by name, all of the system's
- * @throws StudyRefused where the formula is not a finite number on part of the domain, or a catalogue parameter is out of range
+ * @throws StudyRefused where the formula is not a finite number on part of the domain
  */
 export function modelOf(study: Study, parameters: Readonly<Record<string, number>>): MapModel {
   const { system, domain } = study;
@@ -24,7 +24,9 @@ export function modelOf(study: Study, parameters: Readonly<Record<string, number
   const values = names.map((n) => parameters[n]);
   const wrong = checkDomain(tree, scope, values, from, to);
   if (wrong) {
-    const where = wrong.from === wrong.to ? `at ${wrong.from}` : `from ${wrong.from} to ${wrong.to}`;
+    const tidy = (v: number) => (Math.abs(v) < 1e-12 * (to - from) ? 0 : Number(v.toPrecision(6)));
+    const [a, b] = [tidy(wrong.from), tidy(wrong.to)];
+    const where = a === b ? `at ${a}` : `from ${a} to ${b}`;
     throw new StudyRefused(
       'system.formulas[0]',
       `${wrong.reason} ${where}; choose a domain where the formula is a finite number`,

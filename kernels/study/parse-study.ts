@@ -160,6 +160,16 @@ function checkRanges(study: Study, faults: Fault[]): void {
     if (!(s >= low && s <= high))
       faults.push({ path, message: `${s} on a domain of length ${to - from}; allowed: ${low} to ${high}` });
   });
+  for (const [name, value] of Object.entries(system.parameters)) {
+    const range = catalogueRange(study, name);
+    if (outside(range, value)) {
+      const path = pathText(['system', 'parameters', name]);
+      faults.push({
+        path,
+        message: `${value} for ${system.id}; allowed: ${range?.join(' to ')} (type the formula for other values)`,
+      });
+    }
+  }
   system.breaks?.forEach((list, v) => {
     list.forEach((b, i) => {
       if (!(b >= domain[v].from && b <= domain[v].to))
@@ -261,6 +271,15 @@ export function axisValues(axis: SweepAxis): number[] {
   return Array.from({ length: count }, (_, i) => (i === count - 1 ? to : from + part(i) * (to - from)));
 }
 
+/** Range of a catalogue system's parameter; null where the system is typed. */
+function catalogueRange(study: Study, parameter: string): readonly [number, number] | null {
+  const entry = study.system.id === undefined ? undefined : findSystem(study.system.id);
+  return entry?.parameters.find((p) => p.name === parameter)?.range ?? null;
+}
+
+const outside = (range: readonly [number, number] | null, value: number) =>
+  range !== null && !(value >= range[0] && value <= range[1]);
+
 function checkSweep(study: Study, faults: Fault[]): void {
   const { system, noise, domain } = study;
   let cases = 1;
@@ -285,6 +304,10 @@ function checkSweep(study: Study, faults: Fault[]): void {
           message: `no parameter ${parameter}; ${near ? `did you mean parameters.${near}?` : `known: ${Object.keys(system.parameters).join(', ') || 'none'}`}`,
         });
       }
+      const range = catalogueRange(study, parameter);
+      const bad = values.find((v) => outside(range, v));
+      if (bad !== undefined)
+        faults.push({ path, message: `${parameter} ${bad} for ${system.id}; allowed: ${range?.join(' to ')}` });
     } else if (name === 'noise.sigma') {
       if (noise.kind === 'none')
         faults.push({ path: `${path}.over`, message: 'there is no noise to sweep; choose a kind other than "none"' });
