@@ -12,6 +12,7 @@ import { KeyNumbers } from './key-numbers';
 import { NoisePanel } from './noise-panel';
 import { Settings } from './settings';
 import { SpectrumPanel } from './spectrum-panel';
+import { StepsPanel } from './steps-panel';
 import { StudyBar } from './study-bar';
 import { StudyFaults } from './study-faults';
 
@@ -40,7 +41,10 @@ export function Bench({ beginning, catalogue, addressFault }: BenchProps) {
         <div className="mt-4 grid gap-x-8 gap-y-8 lg:grid-cols-[minmax(0,1.85fr)_minmax(0,1fr)]">
           <div className="min-w-0 lg:border-r lg:border-rule lg:pr-8">
             <DensityPanel />
-            <div className="mt-6">
+            <div className="mt-5">
+              <StepsPanel />
+            </div>
+            <div className="mt-5">
               <KeyNumbers />
             </div>
           </div>

@@ -10,9 +10,11 @@ import {
   type ExploreBeginning,
   type ExploreStore,
 } from '@/lib/client/explore-store';
+import { createSideStore, type SideActions, type SideState, type SideStore } from '@/lib/client/side-store';
 import type { SystemEntry } from '@/lib/shared/system-entry';
 
 const StoreContext = createContext<ExploreStore | null>(null);
+const SideContext = createContext<SideStore | null>(null);
 const CatalogueContext = createContext<SystemEntry[]>([]);
 
 const timers = {
@@ -30,13 +32,20 @@ interface ExploreProviderProps {
 
 export function ExploreProvider({ beginning, catalogue, children }: ExploreProviderProps) {
   const [store] = useState(() => createExploreStore(beginning, browserKernelHost, timers));
+  const [side] = useState(() => createSideStore(store, browserKernelHost, timers));
   useEffect(() => {
     store.getState().start();
-    return () => store.getState().dispose();
-  }, [store]);
+    const end = side.getState().start();
+    return () => {
+      end();
+      store.getState().dispose();
+    };
+  }, [store, side]);
   return (
     <CatalogueContext value={catalogue}>
-      <StoreContext value={store}>{children}</StoreContext>
+      <StoreContext value={store}>
+        <SideContext value={side}>{children}</SideContext>
+      </StoreContext>
     </CatalogueContext>
   );
 }
@@ -49,6 +58,13 @@ export function useExploreStore(): ExploreStore {
 
 export function useExplore<T>(select: (state: ExploreState & ExploreActions) => T): T {
   return useStore(useExploreStore(), select);
+}
+
+/** What stands beside the picture: rail, strip, trails, eigenfunction. */
+export function useSide<T>(select: (state: SideState & SideActions) => T): T {
+  const store = useContext(SideContext);
+  if (store === null) throw new Error('the bench is used outside its provider');
+  return useStore(store, select);
 }
 
 /** The catalogue's entry for a study's system; undefined for a typed formula. */

@@ -2,7 +2,7 @@
 
 import { useEffect, useState } from 'react';
 import { Button } from '@/components/ui/button';
-import { useExplore } from './explore-context';
+import { useExplore, useSide } from './explore-context';
 
 const PATIENCE_MS = 500;
 
@@ -13,6 +13,7 @@ export function ProgressLine() {
   const failure = useExplore((state) => state.failure);
   const picture = useExplore((state) => state.picture);
   const stop = useExplore((state) => state.stop);
+  const stopSide = useSide((state) => state.stop);
   const [long, setLong] = useState(false);
   useEffect(() => {
     if (!computing) return setLong(false);
@@ -23,10 +24,16 @@ export function ProgressLine() {
   const share = progress && progress.total > 0 ? progress.done / progress.total : null;
   const left = share !== null && progress && share > 0.05 ? (progress.seconds / share) * (1 - share) : null;
   return (
-    <div className="ml-auto flex h-8 w-60 items-center leading-tight sm:w-80 gap-3 text-muted" role="status">
+    <div className="ml-auto flex h-8 w-48 items-center leading-tight sm:w-80 gap-3 text-muted" role="status">
       {long && computing ? (
         <>
-          <Button onClick={stop} className="h-7 py-0">
+          <Button
+            onClick={() => {
+              stop();
+              stopSide();
+            }}
+            className="h-7 py-0"
+          >
             Stop
           </Button>
           <span>

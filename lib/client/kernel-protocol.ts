@@ -1,3 +1,5 @@
+import type { Mode } from '@/kernels/mode';
+import type { RailPoint } from '@/kernels/solve/rail-point';
 import type { Result, StudyFile } from '@/lib/shared/study-types';
 import type { TypesetFormula } from '@/lib/shared/typeset-types';
 
@@ -10,13 +12,17 @@ export interface StudyFault {
   length?: number;
 }
 
+export type { Mode, RailPoint };
+
 export type Pass = 'live' | 'full';
 
 export type KernelRequest =
   | { type: 'share'; wanted: Int32Array }
   | { type: 'compute'; id: number; study: unknown; pass: Pass }
   | { type: 'typeset'; id: number; formula: string; variables: string[]; parameters: string[] }
-  | { type: 'check'; id: number; study: unknown };
+  | { type: 'check'; id: number; study: unknown }
+  | { type: 'rail'; id: number; study: unknown; sigmas: number[] }
+  | { type: 'mode'; id: number; study: unknown; index: number };
 
 export type KernelReply =
   | { type: 'progress'; id: number; done: number; total: number }
@@ -25,4 +31,7 @@ export type KernelReply =
   | { type: 'stopped'; id: number }
   | { type: 'failed'; id: number; message: string }
   | { type: 'typeset'; id: number; formula: TypesetFormula }
-  | { type: 'checked'; id: number; study: StudyFile };
+  | { type: 'checked'; id: number; study: StudyFile }
+  | { type: 'railPoint'; id: number; point: RailPoint }
+  | { type: 'railDone'; id: number }
+  | { type: 'mode'; id: number; mode: Mode };

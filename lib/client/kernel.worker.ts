@@ -1,7 +1,7 @@
-import { parseStudy, type RunCache, run, Stopped, StudyRefused } from '@/kernels';
+import { mode, parseStudy, type RunCache, rail, run, Stopped, type Study, StudyRefused } from '@/kernels';
 import { FormulaError } from '@/kernels/formula/formula-error';
 import { typesetFormula } from '@/lib/shared/typeset-study';
-import type { KernelReply, KernelRequest, StudyFault } from './kernel-protocol';
+import type { KernelReply, KernelRequest, RailPoint, StudyFault } from './kernel-protocol';
 import { runtimeName } from './runtime-name';
 
 const scope = self as unknown as {
@@ -24,6 +24,14 @@ function answer(request: Exclude<KernelRequest, { type: 'share' }>): KernelReply
   const { id } = request;
   try {
     if (request.type === 'compute') return compute(id, request.study, request.pass === 'full');
+    if (request.type === 'rail') {
+      const onPoint = (_index: number, point: RailPoint) => scope.postMessage({ type: 'railPoint', id, point });
+      rail(parsed(request.study), request.sigmas, { checkpoint: watch(id), cache, onPoint });
+      return { type: 'railDone', id };
+    }
+    if (request.type === 'mode') {
+      return { type: 'mode', id, mode: mode(parsed(request.study), request.index, { checkpoint: watch(id), cache }) };
+    }
     if (request.type === 'check') {
       const { faults } = parseStudy(request.study);
       // The file as it was written, not the study with every default written out: it is saved again as it came.
@@ -45,8 +53,9 @@ function compute(id: number, input: unknown, uncertainties: boolean): KernelRepl
   if (faults) return { type: 'refused', id, faults: [...faults] };
   const began = performance.now();
   let reported = began;
+  const stopIfStale = watch(id);
   const checkpoint = (done: number, total: number) => {
-    if (wanted !== null && Atomics.load(wanted, 0) !== id) throw new Stopped();
+    stopIfStale();
     const now = performance.now();
     if (now - reported < BETWEEN_REPORTS_MS) return;
     reported = now;
@@ -54,6 +63,19 @@ function compute(id: number, input: unknown, uncertainties: boolean): KernelRepl
   };
   const result = run(study, { runtime, checkpoint, uncertainties, cache });
   return { type: 'result', id, result, seconds: (performance.now() - began) / 1000 };
+}
+
+/** Ends a computation that nobody wants any more. */
+function watch(id: number) {
+  return () => {
+    if (wanted !== null && Atomics.load(wanted, 0) !== id) throw new Stopped();
+  };
+}
+
+function parsed(input: unknown): Study {
+  const { study, faults } = parseStudy(input);
+  if (faults) throw new StudyRefused(faults[0].path, faults[0].message);
+  return study;
 }
 
 function faultsOf(error: unknown): StudyFault[] | null {
