@@ -8,7 +8,6 @@ import { withInterval } from './study-edits';
 const kinds: { value: End; label: string }[] = [
   { value: 'absorbing', label: 'absorbing: what leaves is lost' },
   { value: 'reflecting', label: 'reflecting: mirrored back' },
-  { value: 'holding', label: 'holding: stays at the end' },
 ];
 
 /** What happens to a state that noise carries past an end. */
@@ -40,6 +39,7 @@ export function EndsPicker() {
               </option>
             ))}
             <option value="periodic">periodic: a circle</option>
+            {(side === 'low' ? low : high) === 'holding' && <option value="holding">holding: not computed yet</option>}
           </select>
         </Field>
       ))}

@@ -8,6 +8,7 @@ import type { StudyFile } from '@/lib/shared/study-types';
 import { EndsPicker } from './ends-picker';
 import { useExplore } from './explore-context';
 import { FormulaField } from './formula-field';
+import { StartEditor } from './start-editor';
 import { withKind, withPoints } from './study-edits';
 import { SystemPicker } from './system-picker';
 
@@ -23,12 +24,12 @@ export function Settings() {
   const open = opened || typed;
   return (
     <div className="screen-only mt-2 grow">
-      <div className="flex flex-wrap items-start gap-x-5 gap-y-2">
+      <div className="relative flex flex-wrap items-start gap-x-5 gap-y-2">
         <SystemPicker />
         {open && <FormulaField />}
         {!typed && (
           <TextButton aria-expanded={open} onClick={() => setOpened(!opened)}>
-            {open ? 'Fewer settings' : 'Formula, ends, grid'}
+            {open ? 'Fewer settings' : 'Formula, ends, grid, start density'}
           </TextButton>
         )}
       </div>
@@ -65,6 +66,7 @@ export function Settings() {
           </Field>
         </div>
       )}
+      {open && <StartEditor />}
     </div>
   );
 }

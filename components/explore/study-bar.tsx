@@ -10,6 +10,7 @@ import { OpenStudy } from './open-study';
 export function StudyBar() {
   const study = useExplore((state) => state.study);
   const edit = useExplore((state) => state.edit);
+  const rest = useExplore((state) => state.rest);
   const undo = useExplore((state) => state.undo);
   const redo = useExplore((state) => state.redo);
   const canUndo = useExplore((state) => state.past.length > 0);
@@ -23,6 +24,7 @@ export function StudyBar() {
           placeholder="Untitled study"
           maxLength={200}
           onChange={({ target }) => edit((current) => ({ ...current, title: target.value }), true)}
+          onBlur={rest}
           className="w-full text-ellipsis bg-transparent text-2xl font-semibold placeholder:text-muted"
         />
       </h1>

@@ -1,3 +1,4 @@
+import { START_STEPS, type Start } from '@/lib/shared/start-density';
 import type { Bounds } from '@/lib/shared/step-number';
 import type { StudyFile } from '@/lib/shared/study-types';
 import type { SystemEntry } from '@/lib/shared/system-entry';
@@ -29,10 +30,18 @@ export function withPoints(study: StudyFile, points: number | 'auto'): StudyFile
   return Object.keys(grid).length > 0 ? { ...others, grid } : others;
 }
 
+/** Another start density; none stands for the usual one. */
+export function withStart(study: StudyFile, start: Start | null): StudyFile {
+  const { density, ...ask } = study.ask;
+  if (start === null) return { ...study, ask };
+  return { ...study, ask: { ...ask, density: { at: density?.at ?? START_STEPS, start } } };
+}
+
 /** A system of the catalogue with its usual parameters, domain and noise level. */
 export function withSystem(study: StudyFile, entry: SystemEntry): StudyFile {
   return {
-    ...study,
+    // A start belongs to the domain that it was chosen on.
+    ...withStart(study, null),
     title: `${entry.title} under noise`,
     system: {
       type: 'map',

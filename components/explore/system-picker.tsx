@@ -1,38 +1,39 @@
 'use client';
 
-import { controlLook, Field } from '@/components/ui/field';
-import { useCatalogue, useExplore } from './explore-context';
+import { useState } from 'react';
+import { TextButton } from '@/components/ui/text-button';
+import { useCatalogue, useExplore, useSystem } from './explore-context';
 import { withFormula, withSystem } from './study-edits';
+import { SystemAbout } from './system-about';
+import { OWN_FORMULA, SystemCombobox } from './system-combobox';
 
 /** A system of the catalogue, or a formula of one's own, which begins as the chosen system's. */
 export function SystemPicker() {
   const catalogue = useCatalogue();
-  const id = useExplore((state) => state.study.system.id);
+  const system = useSystem();
   const edit = useExplore((state) => state.edit);
+  const [about, setAbout] = useState(false);
   const choose = (chosen: string) => {
-    const entry = catalogue.find((candidate) => candidate.id === chosen);
+    const entry = catalogue.find(({ id }) => id === chosen);
     if (entry) return edit((current) => withSystem(current, entry));
-    const before = catalogue.find((candidate) => candidate.id === id) ?? catalogue[0];
+    if (chosen !== OWN_FORMULA || system === undefined) return;
     edit((current) =>
-      withFormula(current, before.formula, before.variable, Object.keys(current.system.parameters ?? {})),
+      withFormula(current, system.formula, system.variable, Object.keys(current.system.parameters ?? {})),
     );
   };
   return (
-    <Field label="System">
-      <select value={id ?? ''} onChange={({ target }) => choose(target.value)} className={controlLook}>
-        {[...new Set(catalogue.map(({ group }) => group))].map((group) => (
-          <optgroup key={group} label={group}>
-            {catalogue
-              .filter((entry) => entry.group === group)
-              .map((entry) => (
-                <option key={entry.id} value={entry.id}>
-                  {entry.title}
-                </option>
-              ))}
-          </optgroup>
-        ))}
-        <option value="">A formula of your own</option>
-      </select>
-    </Field>
+    <>
+      <SystemCombobox catalogue={catalogue} chosen={system?.id ?? OWN_FORMULA} onChoose={choose} />
+      {system && (
+        <TextButton aria-expanded={about} onClick={() => setAbout(!about)}>
+          What is known
+        </TextButton>
+      )}
+      {system && about && (
+        <section aria-label={`What is known of: ${system.title}`} className="order-last max-w-3xl basis-full">
+          <SystemAbout system={system} />
+        </section>
+      )}
+    </>
   );
 }

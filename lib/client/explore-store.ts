@@ -1,5 +1,5 @@
 import { createStore, type StoreApi } from 'zustand/vanilla';
-import { benchRequest } from '@/lib/shared/bench-study';
+import { benchRequest, sameWork } from '@/lib/shared/bench-study';
 import type { StudyFile } from '@/lib/shared/study-types';
 import type { TypesetFormula } from '@/lib/shared/typeset-types';
 import { type ExploreState, edited, firstState, type Picture, pictured, redone, refused, undone } from './explore-core';
@@ -58,23 +58,30 @@ export function createExploreStore(from: ExploreBeginning, host: KernelHost, tim
         if (get().faults.length === 0) compute('full');
       });
     };
+    /** Another title is no other work: picture and faults stay as they are. */
+    const take = (change: Partial<ExploreState>) => {
+      const before = get();
+      if (change.study === undefined || sameWork(before.study, change.study)) {
+        set({ ...change, faults: before.faults });
+        return;
+      }
+      set(change);
+      computeAndRest();
+    };
     return {
       ...firstState(from.study),
       typesets: from.typesets ?? {},
       picture: from.picture ?? null,
       kernel,
       edit(change, moving = false) {
-        set(edited(get(), change(get().study), moving));
-        computeAndRest();
+        take(edited(get(), change(get().study), moving));
       },
       rest: () => set({ moving: false }),
       undo() {
-        set(undone(get()));
-        computeAndRest();
+        take(undone(get()));
       },
       redo() {
-        set(redone(get()));
-        computeAndRest();
+        take(redone(get()));
       },
       stop() {
         cancelRest();

@@ -54,3 +54,9 @@ export function noiseLevel(study: StudyFile): number | null {
   const { sigma } = study.noise;
   return (Array.isArray(sigma) ? sigma[0] : sigma) ?? null;
 }
+
+/** Whether two studies ask for the same work: title and notes are words about it. Compares by reference, for edits. */
+export function sameWork(one: StudyFile, other: StudyFile): boolean {
+  const names = new Set([...Object.keys(one), ...Object.keys(other)] as (keyof StudyFile)[]);
+  return [...names].every((name) => name === 'title' || name === 'notes' || one[name] === other[name]);
+}

@@ -11,6 +11,15 @@ export interface ParameterEntry {
   default: number;
 }
 
+/** Something known of a system from the literature or by an exact argument. */
+export interface KnownEntry {
+  quantity: string;
+  /** What it holds for: "r = 4, sigma = 0.05"; empty where it holds throughout. */
+  holdsFor: string;
+  value: string;
+  source: string;
+}
+
 /** What pages know of a system of the catalogue: plain data, no functions. */
 export interface SystemEntry {
   id: string;
@@ -25,4 +34,5 @@ export interface SystemEntry {
   /** The usual noise level, in the unit of the variable. */
   sigma: number;
   citation: string;
+  known: KnownEntry[];
 }
