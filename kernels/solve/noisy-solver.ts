@@ -103,8 +103,9 @@ export class NoisySolver {
 
   /** Probability of leaving per step to a relative tolerance, without the field of times: what a noise rail needs. */
   leavingPerStep(tolerance: number): number {
-    return rateBySweeps(this.positiveOperator(), this.leaveProbability(), this.stationary(), tolerance, this.checkpoint)
-      .perStep;
+    const leave = this.leaveProbability();
+    if (!leave.some((p) => p > 0)) return 0; // rarer than numbers reach
+    return rateBySweeps(this.positiveOperator(), leave, this.stationary(), tolerance, this.checkpoint).perStep;
   }
 
   /**
