@@ -13,6 +13,8 @@ export interface RailOptions {
   /** as in `run`; `done` counts noise levels */
   readonly checkpoint?: Checkpoint;
   readonly cache?: RunCache;
+  /** mean exit times above it (steps) are only bounded from above, at a tenth of the cost; default: all are exact */
+  readonly roughAbove?: number;
   /** called for each point as soon as it is there, with its place among the asked levels */
   onPoint?(index: number, point: RailPoint): void;
 }
@@ -26,13 +28,16 @@ export interface RailOptions {
  * @throws RangeError for a study without noise; StudyRefused for a formula that cannot be computed; what `checkpoint` throws
  */
 export function rail(study: Study, sigmas: readonly number[], options: RailOptions = {}): RailPoint[] {
-  const { checkpoint = neverStop, cache = new Map(), onPoint } = options;
+  const { checkpoint = neverStop, cache = new Map(), roughAbove, onPoint } = options;
   if (study.noise.kind === 'none') throw new RangeError('noise.kind "none": a noise axis needs noise');
   return sigmas.map((sigma, index) => {
     const watch: Checkpoint = (done, of) => checkpoint(index + Math.min(0.99, done / Math.max(1, of)), sigmas.length);
     watch(0, 1);
     const setup = { ...caseSetup(study, { 'noise.sigma': sigma }, cache, watch), points: 'auto' as const };
-    const point = pointAt(() => railPoint(new NoisySolver(planOf(setup, RAIL_TOLERANCE, 1), sigma, watch)), sigma);
+    const point = pointAt(
+      () => railPoint(new NoisySolver(planOf(setup, RAIL_TOLERANCE, 1), sigma, watch), roughAbove),
+      sigma,
+    );
     onPoint?.(index, point);
     return point;
   });

@@ -108,20 +108,24 @@ export class NoisySolver {
     return rateBySweeps(this.positiveOperator(), leave, this.stationary(), tolerance, this.checkpoint).perStep;
   }
 
-  /**
-   * The direct operator with a band wide enough for its exits: entries below 1e-16 of the rate add nothing to it.
-   * The rate is at least what leaves from where the density stands well above round-off; where nothing does, the band is
-   * as wide as the noise's density reaches.
-   */
-  private positiveOperator() {
-    const { noise } = this.plan;
+  /** What surely leaves per step: from where the density stands well above round-off. A lower bound of the rate; 0 to 1. */
+  sureRate(): number {
     const rho = this.stationary();
     const leave = this.leaveProbability();
     const sure = 1e-10 * rho.reduce((m, v) => Math.max(m, v), 0);
     let rate = 0;
     for (let i = 0; i < rho.length; i++) if (rho[i] > sure) rate += this.weights[i] * rho[i] * leave[i];
-    const multiples =
-      rate > 1e-280 ? Math.min(noise.fullReach, noise.reachOf(1e-16 * Math.min(1, rate))) : noise.fullReach;
+    return Math.min(1, rate);
+  }
+
+  /**
+   * The direct operator with a band wide enough for its exits: entries below 1e-16 of the rate add nothing to it. Where
+   * nothing surely leaves, the band is as wide as the noise's density reaches.
+   */
+  private positiveOperator() {
+    const { noise } = this.plan;
+    const rate = this.sureRate();
+    const multiples = rate > 1e-280 ? Math.min(noise.fullReach, noise.reachOf(1e-16 * rate)) : noise.fullReach;
     return this.plan.directOperator(this.sigma, multiples, this.checkpoint);
   }
 
