@@ -9,6 +9,7 @@ import { DensityPanel } from './density-panel';
 import { EquationForm } from './equation-form';
 import { ExploreProvider, useExplore } from './explore-context';
 import { KeyNumbers } from './key-numbers';
+import { ModePanel } from './mode-panel';
 import { NoisePanel } from './noise-panel';
 import { Settings } from './settings';
 import { SpectrumPanel } from './spectrum-panel';
@@ -48,7 +49,12 @@ export function Bench({ beginning, catalogue, addressFault }: BenchProps) {
               <KeyNumbers />
             </div>
           </div>
-          <SpectrumPanel />
+          <div className="min-w-0">
+            <SpectrumPanel />
+            <div className="mt-5">
+              <ModePanel />
+            </div>
+          </div>
         </div>
         <div className="mt-6 max-sm:contents">
           <NoisePanel />

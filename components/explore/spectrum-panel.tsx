@@ -1,40 +1,55 @@
 'use client';
 
-import { useState } from 'react';
+import { useMemo, useState } from 'react';
 import { FigureFrame } from '@/components/figures/figure-frame';
 import { LegendMark } from '@/components/figures/legend-mark';
 import { ReadoutSlider } from '@/components/figures/readout-slider';
 import { SpectrumFigure, spectrumScale } from '@/components/figures/spectrum-figure';
 import { useWidth } from '@/components/figures/use-width';
+import { trailsThrough } from '@/lib/client/trails';
+import { noiseLevel } from '@/lib/shared/bench-study';
 import { eigenvalueRows } from '@/lib/shared/eigenvalue-rows';
 import type { Eigenvalue } from '@/lib/shared/study-types';
 import { complexText } from './complex-text';
-import { useExplore } from './explore-context';
+import { useExplore, useSide } from './explore-context';
 import { resultNotes } from './result-notes';
 import { SpectrumLedger } from './spectrum-ledger';
 import { SpectrumTable } from './spectrum-table';
 
 const SIZE = 320;
 const none: Eigenvalue[] = [];
+const resolvedOf = (all: Eigenvalue[]) => all.filter(({ resolved }) => resolved !== false);
 
 export function SpectrumPanel() {
   const picture = useExplore((state) => state.picture);
   const [ref, width] = useWidth<HTMLDivElement>(SIZE);
-  const [chosen, setChosen] = useState<number | null>(null);
+  const [pointed, setPointed] = useState<number | null>(null);
+  const kept = useSide((state) => state.chosen);
+  const keep = useSide((state) => state.choose);
+  const levels = useSide((state) => state.trails);
+  const chosen = pointed ?? kept;
   const size = Math.max(Math.min(width, SIZE), 120);
   const spectrum = picture?.case.spectrum;
   const noisy = spectrum?.noisy ?? none;
   const without = spectrum?.deterministic ?? none;
   const rows = eigenvalueRows(noisy.length > 0 ? noisy : without);
+  const sigma = picture ? noiseLevel(picture.study) : null;
+  const trails = useMemo(
+    () => (sigma === null || levels.length === 0 ? [] : trailsThrough(levels, sigma, resolvedOf(noisy))),
+    [levels, sigma, noisy],
+  );
   const nearest = (x: number, y: number) => {
     const scale = spectrumScale(size);
     const distances = noisy.map(({ re, im }) => Math.hypot(scale(re) - x, scale(-im) - y));
     const index = distances.indexOf(Math.min(...distances));
-    setChosen(index >= 0 && distances[index] < 24 ? index : null);
+    setPointed(index >= 0 && distances[index] < 24 ? index : null);
   };
+  const toggle = (index: number) => keep(index === kept ? null : index);
   const marked = chosen === null ? undefined : noisy[chosen];
+  // A pair stands in the row of its first member.
   const shownRow =
-    chosen === null ? null : (rows.find((row) => row.index === chosen || row.index === chosen - 1)?.index ?? null);
+    (rows.find(({ index }) => index === chosen) ?? rows.find(({ pair, index }) => pair && index + 1 === chosen))
+      ?.index ?? null;
   const title = 'Spectrum';
   return (
     <FigureFrame
@@ -42,6 +57,7 @@ export function SpectrumPanel() {
       legend={
         <>
           <LegendMark mark="dot">with noise</LegendMark>
+          {noisy.length > 0 && <LegendMark mark="line-trail">as σ changes</LegendMark>}
           <LegendMark mark="diamond">without{without[0]?.method && `, by ${without[0].method}`}</LegendMark>
         </>
       }
@@ -68,15 +84,16 @@ export function SpectrumPanel() {
     >
       <div ref={ref}>
         <div className="relative mx-auto" style={{ width: size, height: size, maxWidth: '100%' }}>
-          <SpectrumFigure noisy={noisy} without={without} title={title} size={size} chosen={chosen} />
+          <SpectrumFigure noisy={noisy} without={without} title={title} size={size} chosen={chosen} trails={trails} />
           <ReadoutSlider
             label="Readout among the eigenvalues"
             now={chosen ?? 0}
             steps={Math.max(noisy.length - 1, 0)}
             text={marked ? `${(chosen ?? 0) + 1} of ${noisy.length}: ${complexText(marked)}` : 'none chosen'}
             onPoint={nearest}
-            onStep={setChosen}
-            onLeave={() => setChosen(null)}
+            onStep={setPointed}
+            onLeave={() => setPointed(null)}
+            onChoose={() => pointed !== null && toggle(pointed)}
           />
           {marked && (
             <p
@@ -89,7 +106,14 @@ export function SpectrumPanel() {
         </div>
       </div>
       <div className="mt-2 min-h-60">
-        <SpectrumTable rows={rows} settled={picture?.settled ?? false} chosen={shownRow} onChoose={setChosen} />
+        <SpectrumTable
+          rows={rows}
+          settled={picture?.settled ?? false}
+          chosen={shownRow}
+          onPoint={setPointed}
+          kept={kept}
+          onKeep={toggle}
+        />
       </div>
     </FigureFrame>
   );

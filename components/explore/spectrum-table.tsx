@@ -5,13 +5,16 @@ interface SpectrumTableProps {
   rows: EigenvalueRow[];
   settled: boolean;
   chosen: number | null;
-  onChoose(index: number | null): void;
+  onPoint(index: number | null): void;
+  /** Index of the eigenvalue whose eigenfunctions are shown. */
+  kept: number | null;
+  onKeep(index: number): void;
 }
 
 const heads = ['', 'modulus', 'phase', 'lasts, steps', ''];
 
 /** Eigenvalues with noise: how strong, how they turn, how long a pattern of theirs lasts. */
-export function SpectrumTable({ rows, settled, chosen, onChoose }: SpectrumTableProps) {
+export function SpectrumTable({ rows, settled, chosen, onPoint, kept, onKeep }: SpectrumTableProps) {
   return (
     <table className="w-full whitespace-nowrap text-xs sm:text-[0.8125rem]" data-table="spectrum">
       <caption className="sr-only">Eigenvalues with noise; a conjugate pair stands in one row</caption>
@@ -34,12 +37,21 @@ export function SpectrumTable({ rows, settled, chosen, onChoose }: SpectrumTable
         {rows.map((row) => (
           <tr
             key={row.place}
-            onPointerEnter={() => onChoose(row.index)}
-            onPointerLeave={() => onChoose(null)}
-            className={`border-b border-rule-soft ${chosen === row.index ? 'bg-rain-soft' : ''}`}
+            onPointerEnter={() => onPoint(row.index)}
+            onPointerLeave={() => onPoint(null)}
+            onClick={() => onKeep(row.index)}
+            className={`cursor-pointer border-b border-rule-soft ${chosen === row.index ? 'bg-rain-soft' : ''}`}
           >
             <th scope="row" className="py-1 text-left font-normal">
-              {row.place}
+              <button
+                type="button"
+                aria-pressed={kept === row.index}
+                aria-label={`Eigenfunctions of eigenvalue ${row.place}`}
+                // The row's own click does what this one would.
+                className={`text-left underline decoration-rule underline-offset-4 hover:decoration-ink ${kept === row.index ? 'font-semibold decoration-ink' : ''}`}
+              >
+                {row.place}
+              </button>
             </th>
             <td className="pl-2 text-right" data-cell="modulus">
               {formatDigits(row.modulus, { uncertainty: row.uncertainty, digits: row.uncertainty === null ? 4 : 10 })}

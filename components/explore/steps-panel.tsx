@@ -1,6 +1,6 @@
 'use client';
 
-import { useEffect, useMemo, useState } from 'react';
+import { useMemo } from 'react';
 import { FigureFrame } from '@/components/figures/figure-frame';
 import { StepsStrip } from '@/components/figures/steps-strip';
 import { StripCanvas } from '@/components/figures/strip-canvas';
@@ -56,16 +56,6 @@ export function StepsPanel() {
       digits: mass && mass.uncertainty > 0 ? 10 : 4,
     })}${settled && mass && mass.uncertainty > 0 ? ` ${formatUncertainty(mass.uncertainty)}` : ''}`,
   ];
-  const [saved, setSaved] = useState<string | null>(null);
-  // A file has the rows as one image; on the page they are a canvas under the axes.
-  useEffect(() => {
-    if (!settled || rows.length === 0) return setSaved(null);
-    const timer = setTimeout(() => {
-      const canvas = ref.current?.querySelector<HTMLCanvasElement>('canvas[data-strip]');
-      setSaved(canvas?.toDataURL('image/png') ?? null);
-    }, 300);
-    return () => clearTimeout(timer);
-  }, [settled, rows, ref]);
   return (
     <FigureFrame
       title={title}
@@ -96,18 +86,18 @@ export function StepsPanel() {
         <span className="figures ml-2">step {step}</span>
       </div>
       <div ref={ref} className="relative mt-1 h-[200px] overflow-hidden">
-        <StripCanvas rows={rows} from={from} to={to} width={width} rowHeight={ROW} stale={steps !== null && !current} />
         <StepsStrip
           steps={STRIP_STEPS}
           chosen={step}
-          image={saved}
           from={from}
           to={to}
           variable={unit ? `${name}, ${unit}` : name}
           title={title}
           width={width}
           rowHeight={ROW}
-        />
+        >
+          <StripCanvas rows={rows} from={from} to={to} width={width} stale={steps !== null && !current} />
+        </StepsStrip>
         <StepSlider
           step={step}
           last={last}

@@ -11,10 +11,12 @@ interface ReadoutSliderProps {
   onPoint(x: number, y: number): void;
   onStep(now: number): void;
   onLeave(): void;
+  /** A click or Enter: what the readout speaks of is chosen. */
+  onChoose?(): void;
 }
 
 /** Lies over a plot: the pointer or the arrow keys choose the place that the readout speaks of. */
-export function ReadoutSlider({ label, now, steps, text, onPoint, onStep, onLeave }: ReadoutSliderProps) {
+export function ReadoutSlider({ label, now, steps, text, onPoint, onStep, onLeave, onChoose }: ReadoutSliderProps) {
   const point = (event: PointerEvent<HTMLDivElement>) => {
     const box = event.currentTarget.getBoundingClientRect();
     onPoint(event.clientX - box.left, event.clientY - box.top);
@@ -30,6 +32,7 @@ export function ReadoutSlider({ label, now, steps, text, onPoint, onStep, onLeav
       End: steps,
     };
     if (event.key === 'Escape') onLeave();
+    if (event.key === 'Enter') onChoose?.();
     if (!(event.key in next)) return;
     event.preventDefault();
     onStep(Math.min(Math.max(next[event.key], 0), steps));
@@ -46,6 +49,7 @@ export function ReadoutSlider({ label, now, steps, text, onPoint, onStep, onLeav
       className="absolute inset-0 touch-pan-y"
       onPointerMove={point}
       onPointerDown={point}
+      onClick={onChoose}
       onPointerLeave={onLeave}
       onBlur={onLeave}
       onKeyDown={press}

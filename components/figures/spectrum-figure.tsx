@@ -8,6 +8,8 @@ export interface SpectrumFigureProps {
   size: number;
   /** Index of the chosen one among `noisy`. */
   chosen?: number | null;
+  /** Where eigenvalues with noise go as the noise level changes. */
+  trails?: readonly { points: readonly { re: number; im: number }[] }[];
 }
 
 export const SPECTRUM_MARGIN = 20;
@@ -22,7 +24,7 @@ function withKeys(eigenvalues: Eigenvalue[]) {
 }
 
 /** Eigenvalues in the unit circle: filled dots with noise, open diamonds without, faint where unresolved. */
-export function SpectrumFigure({ noisy, without, title, size, chosen }: SpectrumFigureProps) {
+export function SpectrumFigure({ noisy, without, title, size, chosen, trails = [] }: SpectrumFigureProps) {
   const along = spectrumScale(size);
   const x = (re: number) => Math.round(along(re) * 10) / 10;
   const y = (im: number) => Math.round(along(-im) * 10) / 10;
@@ -60,6 +62,15 @@ export function SpectrumFigure({ noisy, without, title, size, chosen }: Spectrum
         <text x={middle} y={SPECTRUM_MARGIN - 6} textAnchor="middle" className="math text-[13px]">
           Im <tspan fontStyle="italic">λ</tspan>
         </text>
+      </g>
+      <g data-series="spectrum-trails" className="stroke-rain" strokeWidth="1" strokeLinejoin="round" opacity="0.6">
+        {trails.map(({ points }, place) => (
+          <path
+            // biome-ignore lint/suspicious/noArrayIndexKey: a trail is told apart by its eigenvalue's place, as dots are
+            key={place}
+            d={`M${points.map(({ re, im }) => `${x(re)} ${y(im)}`).join('L')}`}
+          />
+        ))}
       </g>
       <g data-series="spectrum-without" className="stroke-rust" strokeWidth="1.2">
         {withKeys(without).map(({ key, re, im, resolved }) => (

@@ -1,4 +1,5 @@
 import { scaleLinear } from 'd3-scale';
+import type { ReactNode } from 'react';
 import { BottomAxis } from './axis';
 import { STRIP_MARGIN } from './strip-picture';
 
@@ -6,8 +7,8 @@ export interface StepsStripProps {
   steps: readonly number[];
   /** The chosen row, outlined. */
   chosen: number;
-  /** The rows as one image, an address of data; null before there is one. */
-  image: string | null;
+  /** The rows' canvas; a file has it as one image. */
+  children?: ReactNode;
   from: number;
   to: number;
   /** "x, V" */
@@ -23,7 +24,7 @@ export function stripHeight(rows: number, rowHeight: number): number {
 
 /** Densities step by step, one row each, dark where there is much: the image lies between the axes. */
 export function StepsStrip(props: StepsStripProps) {
-  const { steps, chosen, image, from, to, variable, title, width, rowHeight } = props;
+  const { steps, chosen, children, from, to, variable, title, width, rowHeight } = props;
   const { left, right, top } = STRIP_MARGIN;
   const height = stripHeight(steps.length, rowHeight);
   const inner = Math.max(width - left - right, 1);
@@ -39,18 +40,9 @@ export function StepsStrip(props: StepsStripProps) {
       fill="none"
     >
       <title>{title}</title>
-      {image && (
-        <image
-          href={image}
-          x={left}
-          y={top}
-          width={inner}
-          height={steps.length * rowHeight}
-          preserveAspectRatio="none"
-          // The page has the rows as a canvas below; a file, which takes no class along, shows them.
-          className="invisible"
-        />
-      )}
+      <foreignObject x={left} y={top} width={inner} height={steps.length * rowHeight}>
+        {children}
+      </foreignObject>
       <g className="figures fill-muted text-[12px]">
         {steps.map((step, row) =>
           step % 5 === 0 ? (

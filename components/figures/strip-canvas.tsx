@@ -8,7 +8,6 @@ interface StripCanvasProps {
   from: number;
   to: number;
   width: number;
-  rowHeight: number;
   /** The densities belong to an earlier study. */
   stale: boolean;
 }
@@ -20,9 +19,9 @@ const fallback: { paper: Colour; rain: Colour; ink: Colour } = {
 };
 
 /** The rows of the strip as pixels, drawn in place while something moves. */
-export function StripCanvas({ rows, from, to, width, rowHeight, stale }: StripCanvasProps) {
+export function StripCanvas({ rows, from, to, width, stale }: StripCanvasProps) {
   const ref = useRef<HTMLCanvasElement>(null);
-  const { left, right, top } = STRIP_MARGIN;
+  const { left, right } = STRIP_MARGIN;
   const inner = Math.max(width - left - right, 1);
   useEffect(() => {
     const canvas = ref.current;
@@ -39,17 +38,10 @@ export function StripCanvas({ rows, from, to, width, rowHeight, stale }: StripCa
       media.removeEventListener('change', draw);
     };
   }, [rows, from, to, inner]);
-  return (
-    <canvas
-      ref={ref}
-      data-strip
-      className={`absolute ${stale ? 'opacity-50' : ''}`}
-      style={{ left, top, width: inner, height: rows.length * rowHeight, imageRendering: 'auto' }}
-    />
-  );
+  return <canvas ref={ref} data-strip className={`block size-full ${stale ? 'opacity-50' : ''}`} />;
 }
 
-export function drawStrip(
+function drawStrip(
   canvas: HTMLCanvasElement,
   rows: readonly StripRow[],
   from: number,
