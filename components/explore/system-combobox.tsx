@@ -39,8 +39,11 @@ export function SystemCombobox({ catalogue, chosen, onChoose }: SystemComboboxPr
 
   const show = (text: string) => {
     setTyped(text);
-    const first = findSystems(catalogue, text)[0];
-    move(text === '' ? chosen : (first?.id ?? OWN_FORMULA));
+    const matches = findSystems(catalogue, text);
+    // Who types the beginning of a title means that system, wherever else the word occurs.
+    const meant =
+      matches.find((entry) => entry.title.toLowerCase().startsWith(text.trim().toLowerCase())) ?? matches[0];
+    move(text === '' ? chosen : (meant?.id ?? OWN_FORMULA));
   };
   const hide = () => {
     setTyped(null);

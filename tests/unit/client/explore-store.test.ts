@@ -48,6 +48,21 @@ beforeEach(() => {
 });
 
 describe('the bench', () => {
+  it('computes nothing for another title, which undo takes back all the same', () => {
+    store.getState().edit(withSigma(-1));
+    reply({ type: 'refused', id: sent.at(-1)?.id ?? -1, faults: [{ path: 'noise.sigma', message: 'no' }] });
+    const before = sent.length;
+    store.getState().edit((study) => ({ ...study, title: 'Another', notes: 'Words' }));
+    expect(store.getState().study.title).toBe('Another');
+    // What was wrong with the study still is.
+    expect(store.getState().faults).toHaveLength(1);
+    store.getState().undo();
+    expect(store.getState().study.title).toBe(FIRST_STUDY.title);
+    expect(sent).toHaveLength(before);
+    store.getState().undo();
+    expect(sent.length).toBeGreaterThan(before);
+  });
+
   it('computes fast while something moves and in full at rest', () => {
     store.getState().edit(withSigma(0.02), true);
     answer();
