@@ -113,8 +113,9 @@ function HandleValues({ lanes, points, frame, at, values, end }: HandleValuesPro
     const raw = value === null ? null : y(value);
     const dot = raw === null || !Number.isFinite(raw) ? null : Math.min(Math.max(raw, top + 4), bottom - 4);
     const middle = (top + bottom) / 2;
-    // On the side of the line that has more room.
-    const textY = dot === null ? middle + 4 : dot > middle ? dot - 8 : dot + 17;
+    // On the side of the line that has more room; left of the handle below it, for most curves fall.
+    const below = dot !== null && (dot <= middle || (left && dot + 18 <= bottom));
+    const textY = dot === null ? middle + 4 : below ? dot + 17 : dot - 8;
     return (
       <g key={lane.id} data-lane-value={lane.id}>
         {dot !== null && <circle cx={at} cy={dot} r="4.5" className={laneFill[lane.colour]} />}

@@ -1,4 +1,5 @@
 import type { StartDensity } from '@/kernels/spec';
+import { usualStart } from '@/lib/shared/start-density';
 import type { StudyFile } from '@/lib/shared/study-types';
 
 export type { StartDensity };
@@ -9,10 +10,7 @@ export const STRIP_STEPS = Array.from({ length: 17 }, (_, step) => step);
 /** Where the strip begins if the study does not say: a narrow Gaussian in the lower part of the domain. */
 export function startOf(study: StudyFile): StartDensity {
   const given = study.ask.density?.start;
-  if (given) return given as StartDensity;
-  const { from, to } = study.domain[0];
-  const digits = (value: number) => Number(value.toPrecision(6));
-  return { kind: 'gaussian', mean: [digits(from + 0.22 * (to - from))], sd: [digits(0.02 * (to - from))] };
+  return (given ?? usualStart(study.domain[0])) as StartDensity;
 }
 
 /** The densities of the strip. Without noise they come from cells, of which a moving picture takes fewer. */
