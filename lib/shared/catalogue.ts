@@ -1,5 +1,5 @@
 import { SYSTEMS } from '@/kernels/systems';
-import { ALL_DIGITS, formatDigits } from './format-number';
+import { ALL_DIGITS, formatEntry } from './format-number';
 import type { SystemEntry } from './system-entry';
 import { typesetFormula } from './typeset-study';
 
@@ -34,7 +34,7 @@ export function catalogueEntries(): SystemEntry[] {
         holdsFor: Object.entries(at)
           .map(([name, number]) => `${name} = ${number}`)
           .join(', '),
-        value: typeof value === 'number' ? formatDigits(value, { digits: ALL_DIGITS }) : value,
+        value: typeof value === 'number' ? formatEntry(Number(value.toPrecision(ALL_DIGITS))) : value,
         source,
       })),
     }),
