@@ -33,8 +33,8 @@ export const faults = [
   {
     what: "the kernel's sign: noise about minus the image",
     file: 'kernels/operators/direct-operator.ts',
-    find: 'entries[used + i - lo] = density(x[i] - centre)',
-    replace: 'entries[used + i - lo] = density(x[i] + centre)',
+    find: 'entries[i + shift] = density(x[i] - c)',
+    replace: 'entries[i + shift] = density(x[i] + c)',
     project: 'unit',
     testFile: 'tests/unit/operators/direct-operator.test.ts',
     test: 'are the kernel summed over images',
