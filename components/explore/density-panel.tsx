@@ -8,6 +8,7 @@ import { FigureFrame } from '@/components/figures/figure-frame';
 import { LegendMark } from '@/components/figures/legend-mark';
 import { ReadoutSlider } from '@/components/figures/readout-slider';
 import { useWidth } from '@/components/figures/use-width';
+import { noiseLevel } from '@/lib/shared/bench-study';
 import { formatCount, formatDigits } from '@/lib/shared/format-number';
 import { DensityLedger } from './density-ledger';
 import { useExplore } from './explore-context';
@@ -77,7 +78,12 @@ export function DensityPanel() {
       })}
       notes={() => resultNotes(picture)}
     >
-      <div ref={ref} className="relative h-[260px] overflow-hidden min-[540px]:h-[352px]">
+      <div
+        ref={ref}
+        data-part="density"
+        data-shown-sigma={picture ? noiseLevel(picture.study) : undefined}
+        className="relative h-[260px] overflow-hidden min-[540px]:h-[352px]"
+      >
         <DensityFigure
           noisy={noisy}
           without={without}

@@ -82,7 +82,7 @@ export function SpectrumPanel() {
       })}
       notes={() => resultNotes(picture)}
     >
-      <div ref={ref}>
+      <div ref={ref} data-part="spectrum" data-shown-sigma={sigma ?? undefined}>
         <div className="relative mx-auto" style={{ width: size, height: size, maxWidth: '100%' }}>
           <SpectrumFigure noisy={noisy} without={without} title={title} size={size} chosen={chosen} trails={trails} />
           <ReadoutSlider
@@ -108,6 +108,7 @@ export function SpectrumPanel() {
       <div className="mt-2 min-h-60">
         <SpectrumTable
           rows={rows}
+          sigma={sigma}
           settled={picture?.settled ?? false}
           chosen={shownRow}
           onPoint={setPointed}

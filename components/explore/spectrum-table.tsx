@@ -3,6 +3,8 @@ import { formatDigits, formatUncertainty, NBSP } from '@/lib/shared/format-numbe
 
 interface SpectrumTableProps {
   rows: EigenvalueRow[];
+  /** Noise level that the rows belong to. */
+  sigma: number | null;
   settled: boolean;
   chosen: number | null;
   onPoint(index: number | null): void;
@@ -14,9 +16,14 @@ interface SpectrumTableProps {
 const heads = ['', 'modulus', 'phase', 'lasts, steps', ''];
 
 /** Eigenvalues with noise: how strong, how they turn, how long a pattern of theirs lasts. */
-export function SpectrumTable({ rows, settled, chosen, onPoint, kept, onKeep }: SpectrumTableProps) {
+export function SpectrumTable({ rows, sigma, settled, chosen, onPoint, kept, onKeep }: SpectrumTableProps) {
   return (
-    <table className="w-full whitespace-nowrap text-xs sm:text-[0.8125rem]" data-table="spectrum">
+    <table
+      className="w-full whitespace-nowrap text-xs sm:text-[0.8125rem]"
+      data-table="spectrum"
+      data-part="table"
+      data-shown-sigma={sigma ?? undefined}
+    >
       <caption className="sr-only">Eigenvalues with noise; a conjugate pair stands in one row</caption>
       <thead>
         <tr className="border-b border-rule text-muted">

@@ -8,7 +8,8 @@ const EPS = 2.220446049250313e-16;
  * Eigenvalues as a result states them, largest modulus first; one whose modulus is below its uncertainty is left out.
  *
  * Uncertainty: residual and round-off times the condition number, and the distance to the partner that the other grid
- * gave, times two while the two agree well and five where they do not.
+ * gave, times two while the two agree well and five where they do not. An eigenvalue so ill-conditioned that round-off alone
+ * may have made it is left out as well.
  *
  * @param pairs from the grid that is reported
  * @param other from the second grid; null: no uncertainties
@@ -23,13 +24,16 @@ export function spectrumEntries(
   const entries: Eigenvalue[] = [];
   for (const p of pairs) {
     const modulus = Math.hypot(p.re, p.im);
+    // round-off times condition is a first-order estimate; where it nears the eigenvalue itself, a nilpotent part has been
+    // turned into a ring of small eigenvalues, none of which exists
+    if (EPS * norm * p.condition > 0.01 * modulus) continue;
     let uncertainty: number | null = null;
     if (free) {
       const distance = takeNearest(free, p);
       const roundOff = (p.residual + EPS * norm) * Math.max(1, p.condition);
       uncertainty = (distance <= 1e-9 ? 2 : 5) * distance + roundOff;
       if (!(uncertainty < modulus)) continue;
-    } else if (modulus < 1e-13 * norm * Math.min(1e6, Math.max(1, p.condition))) continue;
+    } else if (modulus < 1e-13 * norm) continue;
     entries.push({ re: p.re, im: p.im, modulus, residual: p.residual, uncertainty, multiplicity: 1 });
   }
   return entries;

@@ -2,6 +2,7 @@ import { mode, parseStudy, type RunCache, rail, run, Stopped, type Study, StudyR
 import { FormulaError } from '@/kernels/formula/formula-error';
 import { typesetFormula } from '@/lib/shared/typeset-study';
 import type { KernelReply, KernelRequest, RailPoint, StudyFault } from './kernel-protocol';
+import { DRAWN_MOST } from './rail-lanes';
 import { runtimeName } from './runtime-name';
 
 const scope = self as unknown as {
@@ -26,7 +27,7 @@ function answer(request: Exclude<KernelRequest, { type: 'share' }>): KernelReply
     if (request.type === 'compute') return compute(id, request.study, request.pass === 'full');
     if (request.type === 'rail') {
       const onPoint = (_index: number, point: RailPoint) => scope.postMessage({ type: 'railPoint', id, point });
-      rail(parsed(request.study), request.sigmas, { checkpoint: watch(id), cache, onPoint });
+      rail(parsed(request.study), request.sigmas, { checkpoint: watch(id), cache, roughAbove: DRAWN_MOST, onPoint });
       return { type: 'railDone', id };
     }
     if (request.type === 'mode') {

@@ -23,19 +23,3 @@ export function widthFault(value: number, { from, to }: Interval): string | null
     ? null
     : `${value} on a domain of length ${length}; allowed: ${1e-9 * length} to ${1e3 * length}`;
 }
-
-/** A start in words, short enough to stand in a line. */
-export function startWords(start: Start): string {
-  switch (start.kind) {
-    case 'uniform':
-      return 'uniform';
-    case 'gaussian':
-      return `Gaussian at ${start.mean[0]}, standard deviation ${start.sd[0]}`;
-    case 'point':
-      return `a point at ${start.at[0]}`;
-    case 'formula':
-      return 'a formula';
-    case 'samples':
-      return `${start.samples.length} samples`;
-  }
-}

@@ -26,13 +26,12 @@ try {
   await page.addInitScript(watch, { delayed: options.delay ?? null });
   await page.goto(`${base}/explore?system=logistic&p.r=3.8&sigma=0.012&on=0,1,absorbing&grid=1024`);
   await page.locator('[data-bench="settled"]').waitFor({ timeout: 60_000 });
-  const handle = page.getByRole('slider', { name: /noise level|sigma/i }).first();
+  const handle = page.getByRole('slider', { name: /^Noise level/ }).last();
   const box = await handle.boundingBox();
   if (!box) throw new Error('no sigma slider on the page');
-  const track = await page.locator('[data-rail-track]').first().boundingBox();
-  const from = box.x + box.width / 2;
+  const from = box.x + 0.4 * box.width;
   const y = box.y + box.height / 2;
-  const right = track ? track.x + track.width * 0.7 : from + 300;
+  const right = box.x + 0.7 * box.width;
   await page.mouse.move(from, y);
   await page.mouse.down();
   for (let i = 0; i < moves; i++) {
@@ -92,8 +91,8 @@ function watch({ delayed }) {
       const begun = performance.now();
       // after the page's own handlers: the slider then tells the sigma that this move asked for
       setTimeout(() => {
-        const slider = document.querySelector('[role="slider"][data-sigma]');
-        if (slider) asked.push({ sigma: Number(slider.getAttribute('data-sigma')), begun, over: false });
+        const slider = document.querySelector('[role="slider"][aria-label^="Noise level"]');
+        if (slider) asked.push({ sigma: Number(slider.getAttribute('aria-valuenow')), begun, over: false });
       }, 0);
     },
     true,
