@@ -45,12 +45,12 @@ export function Bench({ beginning, catalogue, addressFault }: BenchProps) {
             <div className="mt-5">
               <StepsPanel />
             </div>
-            <div className="mt-5">
-              <KeyNumbers />
-            </div>
           </div>
           <div className="min-w-0">
             <SpectrumPanel />
+            <div className="mt-4">
+              <KeyNumbers />
+            </div>
             <div className="mt-5">
               <ModePanel />
             </div>

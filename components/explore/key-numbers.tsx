@@ -17,7 +17,7 @@ export function KeyNumbers() {
   const { exit, spectrum, lyapunov } = picture?.case ?? {};
   return (
     <section aria-label="Key numbers">
-      <dl className="grid grid-cols-2 gap-x-4 gap-y-2 sm:flex sm:flex-wrap sm:gap-x-12">
+      <dl className="grid grid-cols-2 gap-x-4 gap-y-2">
         <KeyNumber
           id="mean-exit-time"
           label="Mean exit time"

@@ -58,7 +58,7 @@ export function NoisePanel() {
   const narrow = width < NARROW;
   const ids = chosenLanes ?? (narrow ? FIRST_LANES.slice(0, 1) : FIRST_LANES);
   const lanes = LANES.filter(({ id }) => ids.includes(id));
-  const laneHeight = narrow ? 52 : 60;
+  const laneHeight = narrow ? 52 : 46;
   const unit = study.system.units?.[0];
   const values = railValues(lanes, picture, rail, sigma);
   const level = limit === null || rail.stale ? null : limitLevel(rail.points, limit);
@@ -97,7 +97,7 @@ export function NoisePanel() {
       >
         <div
           ref={ref}
-          className="relative h-[calc(var(--lanes-narrow)*52px+52px)] overflow-hidden sm:h-[calc(var(--lanes)*60px+52px)]"
+          className="relative h-[calc(var(--lanes-narrow)*52px+52px)] overflow-hidden sm:h-[calc(var(--lanes)*46px+52px)]"
           style={
             {
               '--lanes': (chosenLanes ?? FIRST_LANES).length,

@@ -59,13 +59,13 @@ export function RailControls({
           ))}
         </fieldset>
         <div className="flex gap-1.5">
-          <Button className="h-7 py-0" onClick={() => onZoom(0.5)}>
+          <Button low onClick={() => onZoom(0.5)}>
             Zoom in
           </Button>
-          <Button className="h-7 py-0" onClick={() => onZoom(2)}>
+          <Button low onClick={() => onZoom(2)}>
             Zoom out
           </Button>
-          <Button className="h-7 py-0" onClick={() => onZoom(null)}>
+          <Button low onClick={() => onZoom(null)}>
             Whole rail
           </Button>
         </div>

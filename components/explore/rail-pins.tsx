@@ -29,7 +29,7 @@ export function RailPins({ sigma, pins, onPins }: RailPinsProps) {
     saveFile(fileName(study.title ?? '', 'json'), 'application/json', `${JSON.stringify(study, null, 2)}\n`);
   return (
     <div className="flex flex-wrap items-center gap-x-3 gap-y-1">
-      <Button className="h-7 py-0" onClick={() => onPins(withPin(pins, sigma))} disabled={pins.includes(sigma)}>
+      <Button low onClick={() => onPins(withPin(pins, sigma))} disabled={pins.includes(sigma)}>
         Pin this <span className="math italic">σ</span>
       </Button>
       {pins.length > 0 && (
@@ -54,7 +54,7 @@ export function RailPins({ sigma, pins, onPins }: RailPinsProps) {
         </ul>
       )}
       {(pins.length > 0 || swept.length > 0) && !same && (
-        <Button className="h-7 py-0" onClick={sweep}>
+        <Button low onClick={sweep}>
           {pins.length > 0 ? 'Sweep the pins' : 'Take the sweep out'}
         </Button>
       )}

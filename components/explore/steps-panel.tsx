@@ -16,7 +16,7 @@ import { startWords } from './start-words';
 import { StepSlider } from './step-slider';
 import { useStepPlayer } from './use-step-player';
 
-const ROW = 10;
+const ROW = 7;
 const title = 'From the start, step by step';
 
 /** The density from its start on, one row a step; one row is chosen, by hand or by playing. */
@@ -77,15 +77,15 @@ export function StepsPanel() {
       notes={() => [...resultNotes(picture), `start: ${JSON.stringify(startOf(shown))}`]}
     >
       <div className="screen-only flex items-center gap-1.5 pl-11">
-        <Button className="h-7 py-0" onClick={() => choose(0)}>
+        <Button low onClick={() => choose(0)}>
           Back to the start
         </Button>
-        <Button className="h-7 w-16 py-0" onClick={playing ? pause : play}>
+        <Button low className="w-16" onClick={playing ? pause : play}>
           {playing ? 'Pause' : 'Play'}
         </Button>
         <span className="figures ml-2">step {step}</span>
       </div>
-      <div ref={ref} className="relative mt-1 h-[200px] overflow-hidden">
+      <div ref={ref} className="relative mt-1 h-[149px] overflow-hidden">
         <StepsStrip
           steps={STRIP_STEPS}
           chosen={step}

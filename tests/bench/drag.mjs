@@ -22,9 +22,9 @@ const browser = await chromium.launch({
   args: ['--no-sandbox', '--disable-gpu', '--disable-background-networking'],
 });
 try {
-  const page = await browser.newPage({ viewport: { width: 1440, height: 960 } });
+  const page = await browser.newPage({ viewport: { width: 1440, height: 1100 } });
   await page.addInitScript(watch, { delayed: options.delay ?? null });
-  await page.goto(`${base}/explore?system=logistic&p.r=3.8&sigma=0.012&on=0,1,absorbing&grid=1024`);
+  await page.goto(`${base}/explore?system=logistic&p.r=3.8&sigma=0.012&on=0,1,absorbing&points=1024`);
   await page.locator('[data-bench="settled"]').waitFor({ timeout: 60_000 });
   const handle = page.getByRole('slider', { name: /^Noise level/ }).last();
   const box = await handle.boundingBox();
