@@ -39,25 +39,28 @@ export function Bench({ beginning, catalogue, addressFault }: BenchProps) {
         <Settings />
         <StudyFaults />
         <Address />
+        {/* What moves with sigma stands above the rail, so that all of it is in sight while the rail is dragged. */}
         <div className="mt-4 grid gap-x-8 gap-y-8 lg:grid-cols-[minmax(0,1.85fr)_minmax(0,1fr)]">
           <div className="min-w-0 lg:border-r lg:border-rule lg:pr-8">
             <DensityPanel />
-            <div className="mt-5">
-              <StepsPanel />
-            </div>
           </div>
           <div className="min-w-0">
             <SpectrumPanel />
-            <div className="mt-4">
-              <KeyNumbers />
-            </div>
+          </div>
+        </div>
+        <div className="mt-4 max-sm:contents">
+          <NoisePanel />
+        </div>
+        <div className="mt-6 grid gap-x-8 gap-y-8 lg:grid-cols-[minmax(0,1.85fr)_minmax(0,1fr)]">
+          <div className="min-w-0 lg:border-r lg:border-rule lg:pr-8">
+            <StepsPanel />
+          </div>
+          <div className="min-w-0">
+            <KeyNumbers />
             <div className="mt-5">
               <ModePanel />
             </div>
           </div>
-        </div>
-        <div className="mt-6 max-sm:contents">
-          <NoisePanel />
         </div>
       </BenchState>
     </ExploreProvider>

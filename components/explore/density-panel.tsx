@@ -15,7 +15,7 @@ import { useExplore } from './explore-context';
 import { resultNotes } from './result-notes';
 
 // Low enough on a phone to stand above the noise slider; the class of the drawing's box has the same two heights.
-const heightFor = (width: number) => (width < 508 ? 230 : 256);
+const heightFor = (width: number) => (width < 508 ? 260 : 344);
 
 export function DensityPanel() {
   const picture = useExplore((state) => state.picture);
@@ -82,7 +82,7 @@ export function DensityPanel() {
         ref={ref}
         data-part="density"
         data-shown-sigma={picture ? noiseLevel(picture.study) : undefined}
-        className="relative h-[230px] overflow-hidden min-[540px]:h-[256px]"
+        className="relative h-[260px] overflow-hidden min-[540px]:h-[344px]"
       >
         <DensityFigure
           noisy={noisy}

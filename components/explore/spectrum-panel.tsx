@@ -16,7 +16,7 @@ import { resultNotes } from './result-notes';
 import { SpectrumLedger } from './spectrum-ledger';
 import { SpectrumTable } from './spectrum-table';
 
-const SIZE = 320;
+const SIZE = 248;
 const none: Eigenvalue[] = [];
 const resolvedOf = (all: Eigenvalue[]) => all.filter(({ resolved }) => resolved !== false);
 

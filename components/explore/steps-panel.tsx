@@ -16,7 +16,7 @@ import { startWords } from './start-words';
 import { StepSlider } from './step-slider';
 import { useStepPlayer } from './use-step-player';
 
-const ROW = 7;
+const ROW = 10;
 const title = 'From the start, step by step';
 
 /** The density from its start on, one row a step; one row is chosen, by hand or by playing. */
@@ -85,7 +85,7 @@ export function StepsPanel() {
         </Button>
         <span className="figures ml-2">step {step}</span>
       </div>
-      <div ref={ref} className="relative mt-1 h-[149px] overflow-hidden">
+      <div ref={ref} className="relative mt-1 h-[200px] overflow-hidden">
         <StepsStrip
           steps={STRIP_STEPS}
           chosen={step}
