@@ -153,11 +153,12 @@ test('PNG: on screen, twice, and as wide as it is to be printed', async ({ page 
   const size = (png: Buffer) => [png.readUInt32BE(16), png.readUInt32BE(20)];
   const box = await page.getByRole('img', { name: DENSITY }).boundingBox();
   const wide = Math.round(box?.width ?? 0);
+  const tall = Math.round(box?.height ?? 0);
   const twice = await saved(page, `Save PNG: ${DENSITY}`);
-  expect(size(twice)).toEqual([2 * wide, 704]);
+  expect(size(twice)).toEqual([2 * wide, 2 * tall]);
   await page.getByRole('button', { name: `File options: ${DENSITY}` }).click();
   await page.getByLabel('PNG size').selectOption('1');
-  expect(size(await saved(page, `Save PNG: ${DENSITY}`))).toEqual([wide, 352]);
+  expect(size(await saved(page, `Save PNG: ${DENSITY}`))).toEqual([wide, tall]);
   await page.getByLabel('PNG size').selectOption('print');
   await page.getByLabel('Width, mm').fill('5');
   await expect(page.getByRole('alert').filter({ hasText: '5 mm; allowed: 20 to 600 mm' })).toBeVisible();

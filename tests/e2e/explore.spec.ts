@@ -230,7 +230,7 @@ test('figures go to files: an SVG that stands alone, a CSV with units and source
     page.getByRole('button', { name: 'Save CSV: Density in the long run' }).click(),
   ]);
   const csv = await readFile(await csvFile.path(), 'utf8');
-  expect(csv).toMatch(/^# Smirr, study: /);
-  expect(csv).toContain('x,density with noise,density without noise');
+  expect(csv).toMatch(/^# study sha256: [0-9a-f]{64}\r?\n# Smirr, study: \{/);
+  expect(csv).toContain('x,density with noise,"uncertainty with noise, at most",density without noise');
   expect(csv.trim().split('\r\n').length).toBeGreaterThan(200);
 });

@@ -91,7 +91,7 @@ test('the start density from a file of samples; faults with their line', async (
   await expect(page.getByRole('alert').filter({ hasText: '5 lies outside the domain' })).toBeVisible();
   await page.getByLabel('Column').selectOption({ label: 'V' });
   await expect.poll(() => start(page)).toEqual({ kind: 'samples', samples: [0.1, 0.2, 0.3] });
-  await expect(page.getByText('3 samples')).toBeVisible();
+  await expect(page.getByText('3 samples').first()).toBeVisible();
   await settled(page);
 });
 
