@@ -67,7 +67,7 @@ export function laneGeometry(lane: Lane, place: number, points: readonly RailPoi
     bottom,
     y: (value) => scale(drawnValue(lane, value) ?? value),
     path,
-    ticks: laneTicks(lane, domain).map((value) => ({ value, text: formatTick(value), y: round(scale(value)) })),
+    ticks: apart(laneTicks(lane, domain).map((value) => ({ value, text: formatTick(value), y: round(scale(value)) }))),
     // Clear of the zero line, which lies low where the curve lies high.
     nameY: heights.length === 0 || low ? top + 15 : Math.min(bottom - 6, zero - 5),
     cut: within.some((point) => {
@@ -75,6 +75,16 @@ export function laneGeometry(lane: Lane, place: number, points: readonly RailPoi
       return value !== null && drawnValue(lane, value) !== value && value > 0;
     }),
   };
+}
+
+/** Height that a tick's number takes. */
+const LABEL = 12;
+
+/** Leaves out ticks whose numbers would touch the one below. */
+function apart<T extends { y: number }>(ticks: readonly T[]): T[] {
+  const kept: T[] = [];
+  for (const tick of ticks) if (kept.every(({ y }) => Math.abs(y - tick.y) >= LABEL)) kept.push(tick);
+  return kept;
 }
 
 /** Two or three round values: powers of ten far apart where there are many, else round numbers of a linear scale. */

@@ -97,11 +97,12 @@ export function quietCase(study: Study, setup: CaseSetup, uncertainties: boolean
   }
   if (ask.spectrum) {
     const entries = quietSpectrum(main, other, ask.spectrum.count);
-    out.spectrum = { deterministic: entries, ...gapOf(entries) };
+    // an eigenvalue that moves with the cells says nothing about how long anything lasts
+    out.spectrum = { deterministic: entries, ...gapOf(entries.filter((e) => e.resolved !== false)) };
     if (!out.spectrum.gap)
       warn({
         code: 'no-second-eigenvalue',
-        message: 'no second eigenvalue stands above its uncertainty; gap and relaxation time are not given',
+        message: 'cells resolve no second eigenvalue; gap and relaxation time are not given',
       });
   }
   if (ask.exit) out.exit = exit(ask.exit.start, study, setup, main, other, warn);
